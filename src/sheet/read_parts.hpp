@@ -1,0 +1,32 @@
+// The readers that a sheet is made of; private to this room.
+#pragma once
+#include "sheet/description.hpp"
+#include "sheet/document.hpp"
+#include "sheet/read_sheet.hpp"
+#include "sheet/table_reader.hpp"
+
+namespace assize::sheet {
+
+/// How deep sub-sheets may be nested.
+inline constexpr int deepest_nesting = 8;
+
+/// What readers of nested tables need to know of the whole.
+struct Context {
+  std::string source;
+  const Fetch* fetch;
+  int depth = 0;
+};
+
+/// A sheet or sub-sheet: keys title, field, code, then.
+Result<Description> read_description(const Table& table, int line, const Context& context);
+
+/// The table [code]; `description` already has its field.
+Result<Family> read_family(const Table& table, int line, const Context& context, Description& description);
+
+/// The array [[then]]; elements of bases are read over the field that the words have at that step.
+Result<std::vector<Step>> read_steps(const Node& node, const field::Field& words, const std::string& source);
+
+/// The field of the words of a family before any step, given [field].
+field::Field family_field(const Family& family, const field::Field& field);
+
+}  // namespace assize::sheet
