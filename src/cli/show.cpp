@@ -1,0 +1,8 @@
+// assize show SHEET
+#include "cli/commands.hpp"
+
+namespace assize::cli {
+
+api::Answer<api::Reply> run_show(const Arguments& arguments) { return api::show(arguments.argument); }
+
+}  // namespace assize::cli
