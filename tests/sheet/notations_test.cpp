@@ -10,7 +10,8 @@ namespace {
 
 /// The generator of a shortened cyclic sheet, as coefficients.
 field::Polynomial generator(const std::string& written, const std::string& field = "") {
-  const auto read = read_text(field + "[code]\nfamily = \"shortened-cyclic\"\ncodeword_length = 40\ngenerator = " + written + "\n");
+  const auto read =
+      read_text(field + "[code]\nfamily = \"shortened-cyclic\"\ncodeword_length = 40\ngenerator = " + written + "\n");
   EXPECT_TRUE(read) << read.error().what;
   return std::get<Cyclic>(read->family).generator.value;
 }
@@ -52,30 +53,36 @@ TEST(Notations, OtherFields) {
   EXPECT_EQ(generator(R"({ algebra = "x^2 + 2*x + 1" })", "[field]\norder = 3\n"), (field::Polynomial{1, 2, 1}));
   EXPECT_EQ(generator(R"({ coefficients = [1, "x", "x^2"] })", "[field]\norder = 8\nmodulus = \"x^3 + x + 1\"\n"),
             (field::Polynomial{1, 2, 4}));
-  EXPECT_EQ(generator(R"({ coefficients = ["x^3", "x^7", "x^2+1"] })", "[field]\norder = 8\nmodulus = \"x^3 + x + 1\"\n"),
-            (field::Polynomial{3, 1, 5}));
+  EXPECT_EQ(
+      generator(R"({ coefficients = ["x^3", "x^7", "x^2+1"] })", "[field]\norder = 8\nmodulus = \"x^3 + x + 1\"\n"),
+      (field::Polynomial{3, 1, 5}));
 }
 
 TEST(Canonical, DoesNotDependOnHowTheSheetIsWritten) {
-  const auto a = read_text("title = \"one\"\n[code]\nfamily = \"shortened-cyclic\"\ncodeword_length = 20\n"
-                           "generator = { exponents = [3, 1, 0] }\n");
-  const auto b = read_text("# two\n[field]\norder = 2\n[code]\ngenerator = { notation = \"full-hex\", value = \"0xB\" }\n"
-                           "data_length = 17\nfamily = \"shortened-cyclic\"\n");
+  const auto a = read_text(
+      "title = \"one\"\n[code]\nfamily = \"shortened-cyclic\"\ncodeword_length = 20\n"
+      "generator = { exponents = [3, 1, 0] }\n");
+  const auto b = read_text(
+      "# two\n[field]\norder = 2\n[code]\ngenerator = { notation = \"full-hex\", value = \"0xB\" }\n"
+      "data_length = 17\nfamily = \"shortened-cyclic\"\n");
   ASSERT_TRUE(a && b);
   EXPECT_EQ(to_json(*a).text(),
-            "{\n\"field\":{\"order\":2},\n\"code\":{\"family\":\"shortened-cyclic\",\"codeword_length\":20,\"generator\":\"1101\"}}");
+            "{\n\"field\":{\"order\":2},\n\"code\":{\"family\":\"shortened-cyclic\",\"codeword_length\":20,"
+            "\"generator\":\"1101\"}}");
   EXPECT_EQ(description_digest(*a), description_digest(*b));
 }
 
 TEST(Canonical, FillsInEveryDefault) {
-  const auto read = read_text("[field]\norder = 8\nmodulus = { exponents = [3, 1, 0] }\n[code]\nfamily = \"justesen\"\nouter_length = 7\n"
-                              "outer_dimension = 3\nevaluation_points = \"powers\"\nprimitive_element = \"x^2\"\n"
-                              "[[then]]\nstep = \"extend\"\n");
+  const auto read = read_text(
+      "[field]\norder = 8\nmodulus = { exponents = [3, 1, 0] }\n[code]\nfamily = \"justesen\"\nouter_length = 7\n"
+      "outer_dimension = 3\nevaluation_points = \"powers\"\nprimitive_element = \"x^2\"\n"
+      "[[then]]\nstep = \"extend\"\n");
   ASSERT_TRUE(read) << read.error().what;
-  EXPECT_EQ(to_json(*read).text(),
-            "{\n\"field\":{\"order\":8,\"modulus\":\"1101\"},\n\"code\":{\"family\":\"justesen\",\"outer_length\":7,"
-            "\"outer_dimension\":3,\"evaluation_points\":\"1 2 4 3 6 7 5\",\"primitive_element\":\"4\",\"first_exponent\":0,"
-            "\"image\":\"bits\"},\n\"then\":[\n{\"step\":\"extend\"}]}");
+  EXPECT_EQ(
+      to_json(*read).text(),
+      "{\n\"field\":{\"order\":8,\"modulus\":\"1101\"},\n\"code\":{\"family\":\"justesen\",\"outer_length\":7,"
+      "\"outer_dimension\":3,\"evaluation_points\":\"1 2 4 3 6 7 5\",\"primitive_element\":\"4\",\"first_exponent\":0,"
+      "\"image\":\"bits\"},\n\"then\":[\n{\"step\":\"extend\"}]}");
 }
 
 }  // namespace

@@ -14,6 +14,8 @@ struct Refusal {
   const char* cure;  ///< part of the cure
 };
 
+void PrintTo(const Refusal& refusal, std::ostream* out) { *out << refusal.name; }
+
 class Refusals : public testing::TestWithParam<Refusal> {};
 
 TEST_P(Refusals, NameTheLineAndTheCure) {
@@ -38,7 +40,8 @@ constexpr Refusal refusals[] = {
     {"AmbiguousLength", "[code]\nfamily = \"shortened-cyclic\"\nlength = 20\ngenerator = { exponents = [3, 1, 0] }\n",
      "t.toml:3", "\"length\" is not a key", "codeword_length (check symbols included) or data_length"},
     {"BothLengths",
-     "[code]\nfamily = \"shortened-cyclic\"\ncodeword_length = 20\ndata_length = 17\ngenerator = { exponents = [3, 1, 0] }\n",
+     "[code]\nfamily = \"shortened-cyclic\"\ncodeword_length = 20\ndata_length = 17\ngenerator = { exponents = [3, 1, "
+     "0] }\n",
      "t.toml:3", "both given", "keep one"},
     {"UnknownFamily", "[code]\nfamily = \"turbo\"\n", "t.toml:2", "\"turbo\" is not a family", "generator-matrix"},
     {"FamilyNotText", "[code]\nfamily = 3\n", "t.toml:2", "is an integer, not a string", "family = \"cyclic\""},
@@ -59,8 +62,8 @@ constexpr Refusal refusals[] = {
      "3 is not an element of GF(3)", "0 to 2"},
     {"ElementNegative", "[field]\norder = 3\n[code]\nfamily = \"generator-matrix\"\nrows = [[1, -1]]\n", "t.toml:5",
      "\"-1\" is not an element", "0 to 2"},
-    {"SymbolsNotSeparated", "[field]\norder = 5\n[code]\nfamily = \"generator-matrix\"\nrows = [\"10024\"]\n", "t.toml:5",
-     "10024 is not an element of GF(5)", "separated by blanks"},
+    {"SymbolsNotSeparated", "[field]\norder = 5\n[code]\nfamily = \"generator-matrix\"\nrows = [\"10024\"]\n",
+     "t.toml:5", "10024 is not an element of GF(5)", "separated by blanks"},
     {"PowerInPrimeField", "[field]\norder = 5\n[code]\nfamily = \"generator-matrix\"\nrows = [\"1 x^2\"]\n", "t.toml:5",
      "\"x^2\" is not an element", "0 to 4"},
     {"BarePolynomial", "[code]\nfamily = \"shortened-cyclic\"\ncodeword_length = 30\ngenerator = 0x97\n", "t.toml:4",
@@ -68,20 +71,22 @@ constexpr Refusal refusals[] = {
     {"BarePolynomialText", "[code]\nfamily = \"shortened-cyclic\"\ncodeword_length = 30\ngenerator = \"0x1021\"\n",
      "t.toml:4", "generator is a bare number", "degree = 16 }  means  x^16 + x^12 + x^5 + 1"},
     {"UnknownNotation",
-     "[code]\nfamily = \"cyclic\"\ncodeword_length = 7\ngenerator = { notation = \"hex\", value = \"0xB\" }\n", "t.toml:4",
-     "\"hex\" is not a notation", "full-hex"},
+     "[code]\nfamily = \"cyclic\"\ncodeword_length = 7\ngenerator = { notation = \"hex\", value = \"0xB\" }\n",
+     "t.toml:4", "\"hex\" is not a notation", "full-hex"},
     {"NotationWithoutDegree",
      "[code]\nfamily = \"cyclic\"\ncodeword_length = 7\ngenerator = { notation = \"reversed-hex\", value = \"0xB\" }\n",
      "t.toml:4", "lacks the key \"degree\"", "degree = 16"},
     {"TooLargeForDegree",
-     "[code]\nfamily = \"cyclic\"\ncodeword_length = 7\ngenerator = { notation = \"implicit-top-hex\", value = \"0xB\", degree = 3 }\n",
+     "[code]\nfamily = \"cyclic\"\ncodeword_length = 7\ngenerator = { notation = \"implicit-top-hex\", value = "
+     "\"0xB\", degree = 3 }\n",
      "t.toml:4", "does not fit", "2^degree"},
-    {"NotHex", "[code]\nfamily = \"cyclic\"\ncodeword_length = 7\ngenerator = { notation = \"full-hex\", value = \"B\" }\n",
+    {"NotHex",
+     "[code]\nfamily = \"cyclic\"\ncodeword_length = 7\ngenerator = { notation = \"full-hex\", value = \"B\" }\n",
      "t.toml:4", "not a hexadecimal number", "0x"},
     {"ZeroPolynomial", "[code]\nfamily = \"cyclic\"\ncodeword_length = 7\ngenerator = { coefficients = [0, 0] }\n",
      "t.toml:4", "zero polynomial", ""},
-    {"AlgebraTwice", "[code]\nfamily = \"cyclic\"\ncodeword_length = 7\ngenerator = { algebra = \"x + x\" }\n", "t.toml:4",
-     "has the power x^1 twice", "once"},
+    {"AlgebraTwice", "[code]\nfamily = \"cyclic\"\ncodeword_length = 7\ngenerator = { algebra = \"x + x\" }\n",
+     "t.toml:4", "has the power x^1 twice", "once"},
     {"AlgebraForeign", "[code]\nfamily = \"cyclic\"\ncodeword_length = 7\ngenerator = { algebra = \"D^3 + D + 1\" }\n",
      "t.toml:4", "not a polynomial in x", "x^3 + x + 1"},
     {"ExponentTwice", "[code]\nfamily = \"cyclic\"\ncodeword_length = 7\ngenerator = { exponents = [3, 1, 1] }\n",
@@ -89,18 +94,19 @@ constexpr Refusal refusals[] = {
     {"ExponentHuge", "[code]\nfamily = \"cyclic\"\ncodeword_length = 7\ngenerator = { exponents = [99999999] }\n",
      "t.toml:4", "out of range", "65536"},
     {"HexOverOtherField",
-     "[field]\norder = 3\n[code]\nfamily = \"cyclic\"\ncodeword_length = 8\ngenerator = { notation = \"full-hex\", value = \"0xB\" }\n",
+     "[field]\norder = 3\n[code]\nfamily = \"cyclic\"\ncodeword_length = 8\ngenerator = { notation = \"full-hex\", "
+     "value = \"0xB\" }\n",
      "t.toml:6", "for GF(2) only", "algebra"},
     {"LengthZero", "[code]\nfamily = \"cyclic\"\ncodeword_length = 0\ngenerator = { exponents = [0] }\n", "t.toml:3",
      "out of range", "1 to"},
     {"LengthHuge", "[code]\nfamily = \"cyclic\"\ncodeword_length = 9999999999\ngenerator = { exponents = [0] }\n",
      "t.toml:3", "out of range", "1048576"},
-    {"LengthFraction", "[code]\nfamily = \"cyclic\"\ncodeword_length = 7.5\ngenerator = { exponents = [0] }\n", "t.toml:3",
-     "a number with a fraction", "plain number"},
+    {"LengthFraction", "[code]\nfamily = \"cyclic\"\ncodeword_length = 7.5\ngenerator = { exponents = [0] }\n",
+     "t.toml:3", "a number with a fraction", "plain number"},
     {"DimensionAboveLength", "[code]\nfamily = \"random-linear\"\ncodeword_length = 5\ndimension = 6\nseed = 1\n",
      "t.toml:4", "out of range", "1 to 5"},
-    {"UnknownStep", "[code]\nfamily = \"reed-muller\"\norder = 1\nvariables = 3\n[[then]]\nstep = \"double\"\n", "t.toml:6",
-     "\"double\" is not a step", "extend"},
+    {"UnknownStep", "[code]\nfamily = \"reed-muller\"\norder = 1\nvariables = 3\n[[then]]\nstep = \"double\"\n",
+     "t.toml:6", "\"double\" is not a step", "extend"},
     {"StepTable", "[code]\nfamily = \"reed-muller\"\norder = 1\nvariables = 3\n[then]\nstep = \"extend\"\n", "t.toml:5",
      "\"then\" is a table", "[[then]]"},
     {"ImageOfBinary", "[code]\nfamily = \"reed-muller\"\norder = 1\nvariables = 3\n[[then]]\nstep = \"binary-image\"\n",
@@ -114,21 +120,24 @@ constexpr Refusal refusals[] = {
      "[field]\norder = 8\nmodulus = \"x^3 + x + 1\"\n[code]\nfamily = \"justesen\"\nouter_length = 8\n"
      "outer_dimension = 3\nevaluation_points = \"powers\"\nprimitive_element = 3\n",
      "t.toml:8", "are 7 points, 8 are needed", "shorter"},
-    {"MissingSubSheet", "[code]\nfamily = \"concatenated\"\nouter = \"outer.toml\"\ninner = \"inner.toml\"\n", "t.toml:3",
-     "outer.toml: there is no such file", "check the name"},
+    {"MissingSubSheet", "[code]\nfamily = \"concatenated\"\nouter = \"outer.toml\"\ninner = \"inner.toml\"\n",
+     "t.toml:3", "outer.toml: there is no such file", "check the name"},
     {"NestedError",
      "[code]\nfamily = \"concatenated\"\ninner = \"inner.toml\"\n[code.outer.code]\nfamily = \"cyclic\"\n", "t.toml:4",
      "lacks the key \"generator\"", "generator ="},
 };
 
-INSTANTIATE_TEST_SUITE_P(Sheet, Refusals, testing::ValuesIn(refusals), [](const auto& info) { return info.param.name; });
+INSTANTIATE_TEST_SUITE_P(Sheet, Refusals, testing::ValuesIn(refusals),
+                         [](const auto& each) { return each.param.name; });
 
 TEST(Refusals, HopelessBytes) {
   EXPECT_NE(read_text(std::string("a = 1\n\0", 7)).error().what.find("zero byte"), std::string::npos);
   EXPECT_NE(read_text(std::string(largest_sheet + 1, ' ')).error().what.find("larger than"), std::string::npos);
   EXPECT_FALSE(read_text("a" + std::string(100000, '.') + "b = 1"));
   EXPECT_FALSE(read_text("a = " + std::string(100000, '[')));
-  EXPECT_FALSE(read_text("\x7f" "ELF\x02\x01\x01"));
+  EXPECT_FALSE(
+      read_text("\x7f"
+                "ELF\x02\x01\x01"));
   std::string nested = "[code]\nfamily = \"concatenated\"\n";
   std::string path = "code.outer";
   for (int i = 0; i < 12; ++i, path += ".code.outer") nested += "[" + path + ".code]\nfamily = \"concatenated\"\n";
