@@ -4,6 +4,7 @@
 #include <algorithm>
 
 #include "engine/shard_engine.hpp"
+#include "plan/cost.hpp"
 
 namespace assize::engine {
 
@@ -13,7 +14,7 @@ namespace {
 constexpr std::uint64_t units_not_worth_measuring = std::uint64_t{1} << 23U;
 constexpr double enough_seconds = 0.002;
 constexpr double most_seconds = 0.010;
-constexpr std::uint64_t most_messages = std::uint64_t{1} << 24U;
+constexpr std::uint64_t most_units = std::uint64_t{1} << 25U;  // whatever the clock says
 
 /// The least trial plan with these free rows: its shard 1 is an ordinary coset.
 evidence::EnumerationPlan trial_plan(const code::LinearCode& code, std::uint32_t free_rows) {
@@ -36,6 +37,13 @@ std::unique_ptr<ShardEngine> trial_engine(const code::LinearCode& code, plan::Me
   return nullptr;
 }
 
+/// Trials are made twice and the quicker one counts: the machine may have been busy with something else.
+double seconds_of_trial(const ShardEngine& engine, const Clock& clock) {
+  const double start = clock.seconds();
+  static_cast<void>(engine.run(1));
+  return clock.seconds() - start;
+}
+
 }  // namespace
 
 Forecast forecast(const code::LinearCode& code, const plan::Plan& plan, const RunOptions& options) {
@@ -44,12 +52,11 @@ Forecast forecast(const code::LinearCode& code, const plan::Plan& plan, const Ru
   double rate = 0;
   for (std::uint32_t rows = 0; rows < code.dimension(); ++rows) {
     const auto messages = power_if_fits(code.order(), rows);
-    if (!messages || *messages > most_messages) break;
+    if (!messages || *messages > most_units / plan::cost_per_message(plan.method, code.order(), code.length())) break;
     const auto engine = trial_engine(code, plan.method, *options.kernel, rows);
-    const double start = options.clock->seconds();
-    static_cast<void>(engine->run(1));
-    const double seconds = options.clock->seconds() - start;
-    if (seconds > 0) rate = static_cast<double>(*messages) / seconds;
+    const double seconds =
+        std::min(seconds_of_trial(*engine, *options.clock), seconds_of_trial(*engine, *options.clock));
+    if (seconds > 0) rate = std::max(rate, static_cast<double>(*messages) / seconds);
     if (seconds >= enough_seconds || seconds * code.order() > most_seconds) break;
   }
   if (rate <= 0) return {};

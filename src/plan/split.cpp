@@ -48,7 +48,12 @@ std::uint32_t free_rows(std::uint32_t order, std::uint32_t length, std::uint32_t
     const std::uint64_t messages = power_if_fits(order, rows).value_or(UINT64_MAX);
     const std::uint64_t units = saturated_product(messages, per_message);
     const auto* step = std::ranges::find_if(steps, [units](const Step& s) { return units < s.units_below; });
-    const std::uint64_t most_shards = step != steps.end() ? step->most_shards : most_shards_of_all;
+    std::uint64_t most_shards = most_shards_of_all;
+    if (step != steps.end()) most_shards = step->most_shards;
+    // Over a large field the next choice may be a single coset, which could not be shared: two fixed digits are in
+    // order.
+    if (units >= steps.front().units_below)
+      most_shards = std::clamp<std::uint64_t>(order + 2, most_shards, most_shards_of_all);
     const std::uint64_t counts = std::min<std::uint64_t>(messages, std::uint64_t{length} + 1);
     const std::uint64_t bytes = saturated_product(*shards, bytes_of_shard + bytes_of_count * counts);
     if (*shards <= most_shards && bytes <= room_for_shards) return rows;

@@ -66,6 +66,13 @@ Result<Statement> read_statement(const Json& json, const std::string& path, std:
   return statement;
 }
 
+/// Each kind once and in order, but two distance bounds that do not meet may stand side by side.
+bool may_follow(const Statement& before, const Statement& after) {
+  if (after.kind != before.kind) return after.kind > before.kind;
+  return after.kind == StatementKind::minimum_distance && before.relation == Relation::at_least &&
+         after.relation == Relation::at_most && before.value < after.value;
+}
+
 }  // namespace
 
 std::string Statement::sentence() const {
@@ -110,8 +117,8 @@ Result<Claim> read_claim(const Json& json, std::size_t items) {
     const std::string path = "claim.statements[" + std::to_string(i) + "]";
     auto statement = read_statement(statements[i], path, claim.length, items);
     if (!statement) return statement.error();
-    if (i > 0 && statement->kind <= claim.statements.back().kind)
-      return Failure{path + ".kind", "statements stand in the order of section 3, each kind at most once", ""};
+    if (i > 0 && !may_follow(claim.statements.back(), *statement))
+      return Failure{path + ".kind", "the statements do not stand in the order and number of section 3", ""};
     claim.statements.push_back(std::move(*statement));
   }
   return claim;

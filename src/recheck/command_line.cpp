@@ -134,7 +134,7 @@ Flags:
   --within DURATION        end after 30s, 10m, 2h, 1d
   --for DIGEST             reject a certificate about another description
   --json                   the report as one JSON document
-  --quiet                  no report and no progress, only the exit code
+  --quiet                  print the first line only, and no progress
   --help, --version
 
 Exit codes: 0 PROVEN, 1 REJECTED, 2 the check could not be run, 3 CONSISTENT (nothing wrong, not everything executed).

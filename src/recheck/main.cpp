@@ -6,6 +6,7 @@
 #include <exception>
 
 #include "base/integers.hpp"
+#include "base/version.hpp"
 #include "recheck/brake.hpp"
 #include "recheck/command_line.hpp"
 #include "recheck/json.hpp"
@@ -82,7 +83,9 @@ int check(CommandLine line) {
   if (!line.quiet && isatty(STDERR_FILENO) != 0) line.options.progress = &progress;
   const Report report = recheck(*bytes, line.options);
   progress.clear();
-  if (!line.quiet && !write_result(line.json ? to_json(report) : to_text(report)))
+  std::string result = line.json ? to_json(report) : to_text(report);
+  if (line.quiet && !line.json) result.resize(result.find('\n') + 1);
+  if (!write_result(result))
     return cannot_run(assize::Failure{"standard output", "the report cannot be written", ""}, false);
   return exit_code(report.outcome);
 }
@@ -95,7 +98,8 @@ int run(const std::vector<std::string>& arguments) {
     return cannot_run(line.error(), json);
   }
   if (line->help || line->version) {
-    const std::string_view text = line->help ? help_page() : "assize-recheck, reads certificates of version 1\n";
+    const std::string version = "assize-recheck " + std::string(assize::version) + ", certificates of version 1\n";
+    const std::string_view text = line->help ? help_page() : version;
     if (write_result(text)) return 0;
     return cannot_run(assize::Failure{"standard output", "the text cannot be written", ""}, false);
   }

@@ -50,7 +50,7 @@ void count_shards(const std::vector<Item>& items, Report& report) {
       total += item.enumeration->forms->shards();
       report.shards_present += item.enumeration->shards.size();
     }
-  report.shards_total = static_cast<std::uint64_t>(std::min<BigInteger>(total, max_integer));
+  report.shards_total = total < max_integer ? static_cast<std::uint64_t>(total) : max_integer;
 }
 
 void judge_all(const Claim& claim, const std::vector<Item>& items, const std::vector<std::size_t>& executed,

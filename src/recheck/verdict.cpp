@@ -53,10 +53,11 @@ class Listed {
   std::string because_;
 };
 
-std::optional<std::uint64_t> best_lower(const std::vector<const Item*>& items) {
-  std::optional<std::uint64_t> best;
+/// At least 1: a non-zero word has a non-zero symbol, which needs no evidence.
+std::uint64_t best_lower(const std::vector<const Item*>& items) {
+  std::uint64_t best = 1;
   for (const Item* item : items)
-    if (item->at_least && (!best || *item->at_least > *best)) best = item->at_least;
+    if (item->at_least) best = std::max(best, *item->at_least);
   return best;
 }
 
@@ -68,10 +69,10 @@ std::optional<std::uint64_t> best_upper(const std::vector<const Item*>& items) {
 }
 
 bool refuted(const Statement& statement, const std::vector<const Item*>& items) {
-  const auto lower = best_lower(items);
+  const std::uint64_t lower = best_lower(items);
   const auto upper = best_upper(items);
   const bool too_high = upper && *upper < statement.value;
-  const bool too_low = lower && *lower > statement.value;
+  const bool too_low = lower > statement.value;
   switch (statement.relation) {
     case Relation::exactly:
       return too_high || too_low;
@@ -84,9 +85,9 @@ bool refuted(const Statement& statement, const std::vector<const Item*>& items) 
 }
 
 bool bounds_imply(const Statement& statement, const std::vector<const Item*>& items) {
-  const auto lower = best_lower(items);
+  const std::uint64_t lower = best_lower(items);
   const auto upper = best_upper(items);
-  const bool from_below = lower && *lower >= statement.value;
+  const bool from_below = lower >= statement.value;
   const bool from_above = upper && *upper <= statement.value;
   switch (statement.relation) {
     case Relation::exactly:
