@@ -47,7 +47,7 @@ Result<LinearCode> build(const sheet::Cyclic& family, const sheet::Description& 
         "codeword_length counts the check symbols; make it more than " + std::to_string(r) + ", or write data_length"};
   if (generator.front() == 0)
     return Failure{where, "the generator " + field::to_algebra(generator) + " is divisible by x", "divide it by x"};
-  if (const auto fits = check_size(in, family.codeword_length.line, n - r, r + 1); !fits) return fits.error();
+  if (const auto fits = check_size(in, family.codeword_length.line, n - r, n); !fits) return fits.error();
   if (!family.shortened) {
     // x^n mod g by repeated squaring; 1 exactly when g divides x^n - 1.
     const Polynomial power = field::power_modulo(in.field, {0, 1}, n, generator);

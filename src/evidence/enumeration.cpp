@@ -2,7 +2,6 @@
 #include "evidence/enumeration.hpp"
 
 #include <algorithm>
-#include <ranges>
 
 namespace assize::evidence {
 
@@ -81,7 +80,7 @@ WeightDistribution distribution(const Enumeration& enumeration) {
       contract(weight > 0, "the word of a normalised message is not zero");
       totals[weight] += count;
     }
-  for (BigInteger& count : totals | std::views::values) count *= enumeration.plan.order - 1;
+  for (auto& [weight, count] : totals) count *= enumeration.plan.order - 1;
   totals[0] = 1;
   return totals;
 }

@@ -16,7 +16,8 @@ constexpr std::size_t longest_piece = 255;  // what a byte can count
 /// Weights of `lanes` block words on the positions first .. last - 1, at most 255 of them.
 template <std::size_t lanes>
 void weigh_piece(std::span<const std::uint8_t> negated_base, const std::uint8_t* block, std::size_t stride,
-                 std::size_t first, std::size_t last, std::array<std::uint8_t, lanes>& weights) noexcept {
+                 std::size_t first, std::size_t last, std::array<std::uint8_t, lanes>& result) noexcept {
+  std::array<std::uint8_t, lanes> weights;  // local, so that nothing else can be the same memory
   weights.fill(static_cast<std::uint8_t>(last - first));
   for (std::size_t j = first; j < last; ++j) {
     const std::uint8_t vanishing = negated_base[j];
@@ -24,6 +25,7 @@ void weigh_piece(std::span<const std::uint8_t> negated_base, const std::uint8_t*
     for (std::size_t i = 0; i < lanes; ++i)
       weights[i] = static_cast<std::uint8_t>(weights[i] - (symbols[i] == vanishing ? 1 : 0));
   }
+  result = weights;
 }
 
 /// Weighs and counts `size` <= lanes block words from `block`.
