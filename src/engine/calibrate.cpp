@@ -12,7 +12,7 @@ namespace {
 
 /// Plans below this many units end before a measurement would.
 constexpr std::uint64_t units_not_worth_measuring = std::uint64_t{1} << 23U;
-constexpr double enough_seconds = 0.002;
+constexpr double enough_seconds = 0.001;
 constexpr double most_seconds = 0.010;
 constexpr std::uint64_t most_units = std::uint64_t{1} << 25U;  // whatever the clock says
 

@@ -11,8 +11,8 @@ struct Forecast {
   double messages_per_second = 0;  ///< of all threads together; 0 if not measured
 };
 
-/// Runs a little of the plan's method with the options' kernel and clock; some 20 ms at most, nothing for small codes.
-/// Works for plans without shards too.
+/// Runs a little of the plan's method with the options' kernel and clock; some 10 ms as a rule, nothing for small
+/// codes. Works for plans without shards too.
 Forecast forecast(const code::LinearCode& code, const plan::Plan& plan, const RunOptions& options);
 
 }  // namespace assize::engine

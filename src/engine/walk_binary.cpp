@@ -32,7 +32,7 @@ class BinaryCosetWalk final : public CosetWalk {
         kernel_(kernel) {
     tables_.words = (code.length() + word_bits - 1) / word_bits;
     const std::size_t block_words = std::size_t{1} << block_rows();
-    tables_.stride = (block_words + kernel::block_granule - 1) / kernel::block_granule * kernel::block_granule;
+    tables_.stride = (block_words + kernel::binary_granule - 1) / kernel::binary_granule * kernel::binary_granule;
     block_.resize(tables_.words * tables_.stride);
     for (std::uint32_t i = 0; i < block_rows(); ++i) add_to_block(pack(code.row(code.dimension() - 1 - i)), i);
     // Counting up: the step into bit i sets it and clears all lower ones.

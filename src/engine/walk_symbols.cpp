@@ -18,7 +18,10 @@ class SymbolCosetWalk final : public CosetWalk {
       : CosetWalk(choose_block_rows(code.order(), free_rows, code.length())), field_(code.field()), kernel_(kernel) {
     const std::size_t block_words = *power_if_fits(code.order(), block_rows());
     tables_.order = code.order();
-    tables_.stride = (block_words + kernel::block_granule - 1) / kernel::block_granule * kernel::block_granule;
+    // Kernels take longer strides at once where there is room for them.
+    const std::size_t granule =
+        block_words <= 2 * kernel::symbol_granule ? kernel::symbol_granule : 4 * kernel::symbol_granule;
+    tables_.stride = (block_words + granule - 1) / granule * granule;
     block_.resize(code.length() * tables_.stride);
     std::size_t size = 1;
     for (std::uint32_t i = 0; i < block_rows(); ++i, size *= code.order())

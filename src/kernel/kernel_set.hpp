@@ -22,15 +22,16 @@ struct Lightest {
   friend bool operator==(const Lightest&, const Lightest&) = default;
 };
 
-/// The number of words for which a block table has room is a multiple of this; kernels may read that far.
-inline constexpr std::size_t block_granule = 64;
+/// The number of words for which a block table has room (its stride) is a multiple of this; kernels may read that far.
+inline constexpr std::size_t binary_granule = 32;
+inline constexpr std::size_t symbol_granule = 64;
 
 /// Tables of a binary code.
 ///   block: machine word j of block word i is block[j * stride + i]; block word 0 is zero
 ///   steps: step t = 1, 2, ... adds steps[countr_zero(t)], each `words` machine words
 struct BinaryTables {
   std::size_t words = 0;   ///< machine words of one word
-  std::size_t stride = 0;  ///< room in the block, a multiple of block_granule
+  std::size_t stride = 0;  ///< room in the block, a multiple of binary_granule
   std::span<const std::uint64_t> block;
   std::span<const std::uint64_t> steps;
 };
@@ -50,7 +51,7 @@ using BinaryWalk = Lightest (*)(std::span<std::uint64_t> base, const BinaryTable
 /// is needed inside a block, whatever the field.
 struct SymbolTables {
   std::size_t order = 0;   ///< q
-  std::size_t stride = 0;  ///< room in the block, a multiple of block_granule
+  std::size_t stride = 0;  ///< room in the block, a multiple of symbol_granule
   std::span<const std::uint8_t> block;
   std::span<const std::uint8_t> steps;
   std::span<const std::uint8_t> sums;

@@ -13,7 +13,7 @@ namespace assize::kernel {
 
 namespace {
 
-constexpr std::size_t lanes = 32;  // words side by side; divides block_granule
+constexpr std::size_t lanes = binary_granule;  // words side by side
 
 /// Eight bytes, each the number of ones in that byte of `x`.
 std::uint64_t byte_sums(std::uint64_t x) noexcept {

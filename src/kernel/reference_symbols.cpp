@@ -51,17 +51,18 @@ void count_lanes(std::span<const std::uint8_t> negated_base, const std::uint8_t*
 
 Lightest reference_symbol_walk(std::span<std::uint8_t> negated_base, const SymbolTables& tables, std::size_t block_size,
                                std::size_t step_digits, std::span<std::uint64_t> counts) noexcept {
-  constexpr std::size_t wide = 4 * block_granule;
+  constexpr std::size_t wide = 4 * symbol_granule;
   Tally tally(counts);
   const std::size_t n = negated_base.size();
   std::array<std::uint8_t, 64> digits{};
   for (std::uint64_t first_index = 0;; first_index += block_size) {
     std::size_t i = 0;
-    for (; i + wide <= block_size; i += wide)
-      count_lanes<wide>(negated_base, tables.block.data() + i, tables.stride, wide, first_index + i, tally);
-    for (; i < block_size; i += block_granule)
-      count_lanes<block_granule>(negated_base, tables.block.data() + i, tables.stride,
-                                 std::min(block_granule, block_size - i), first_index + i, tally);
+    for (; i + wide / 2 < block_size && i + wide <= tables.stride; i += wide)
+      count_lanes<wide>(negated_base, tables.block.data() + i, tables.stride, std::min(wide, block_size - i),
+                        first_index + i, tally);
+    for (; i < block_size; i += symbol_granule)
+      count_lanes<symbol_granule>(negated_base, tables.block.data() + i, tables.stride,
+                                  std::min(symbol_granule, block_size - i), first_index + i, tally);
     std::size_t j = 0;
     while (j < step_digits && digits[j] == tables.order - 1) digits[j++] = 0;
     if (j == step_digits) break;
