@@ -118,6 +118,15 @@ Answer<Reply> recheck(const RecheckRequest& request);
 /// Known answers on this machine, with every kernel that runs here.
 Answer<Reply> selftest(const Run& run);
 
+struct FieldRequest {
+  std::string order;    ///< decimal
+  std::string modulus;  ///< polynomial over GF(p), such as "x^3 + x + 1"; empty: none is chosen
+  bool table = false;   ///< the table of logarithms instead
+  bool csv = false;     ///< the reply's text is the table as CSV
+};
+/// What is known of a finite field: irreducible polynomials, primitive elements, conjugates, logarithms.
+Answer<Reply> field(const FieldRequest& request);
+
 /// "assize 0.1.0"
 std::string program_name();
 std::vector<std::string> method_names();

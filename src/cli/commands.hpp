@@ -12,6 +12,7 @@ api::Answer<api::Reply> run_show(const Arguments& arguments);
 api::Answer<api::Reply> run_certify(const Arguments& arguments);
 api::Answer<api::Reply> run_weights(const Arguments& arguments);
 api::Answer<api::Reply> run_recheck(const Arguments& arguments);
+api::Answer<api::Reply> run_field(const Arguments& arguments);
 api::Answer<api::Reply> run_selftest(const Arguments& arguments);
 
 /// The flags that say how a run is done: threads, kernel, method, budget.

@@ -27,6 +27,9 @@ constexpr std::array flags{
     Flag{"--depth", "", "DEPTH", "full", "quick, spot or full: how much is enumerated again"},
     Flag{"--seed", "", "S", "1", "seed of the draw of shards at depth spot"},
     Flag{"--for", "", "SHEET", "", "reject the certificate unless it is about the code of this sheet"},
+    Flag{"--modulus", "", "POLY", "", "modulus of the field, a polynomial such as \"x^3 + x + 1\""},
+    Flag{"--table", "", "", "", "print the table of logarithms instead"},
+    Flag{"--csv", "", "", "", "print the whole table as CSV and nothing else"},
     Flag{"--help", "-h", "", "", "print this page"},
 };
 
@@ -78,6 +81,20 @@ const std::vector<Command>& commands() {
         {"assize recheck recorder.certificate.json --depth quick", "checks all but the enumeration"},
         {"assize recheck recorder.certificate.json --for recorder.toml", "and that it is about this sheet's code"}},
        "0 PROVEN   1 REJECTED   3 CONSISTENT: nothing wrong found, not everything re-derived   2 cannot run"},
+      {"field",
+       "Q",
+       "polynomials, primitive elements, conjugates and logarithms of GF(Q)",
+       "For Q = p^m, m > 1, lists the monic irreducible polynomials of degree m over GF(p) and marks the primitive\n"
+       "ones; with --modulus, the primitive elements of the field with that modulus and its classes of conjugates:\n"
+       "exponents (a cyclotomic coset), order, minimal polynomial. For a prime Q, lists the primitive elements.\n"
+       "Counts are checked against their formulas. Exponents and logarithms are those of x where x is primitive,\n"
+       "otherwise of the least primitive element. The text shows 64 rows of a table, --csv and --json show all.",
+       {"--modulus", "--table", "--csv", "--json", "--quiet", "--help"},
+       {{"assize field 256", "the polynomials that a field of 256 elements can be built from"},
+        {"assize field 8 --modulus \"x^3 + x + 1\"", "primitive elements and classes of conjugates"},
+        {"assize field 8 --modulus \"x^3 + x + 1\" --table", "powers of x"},
+        {"assize field 31 --table --csv", "logarithms modulo 31 for a spreadsheet"}},
+       usual_exit_codes},
       {"selftest",
        "",
        "known answers on this machine, in under a minute",

@@ -50,6 +50,7 @@ api::Answer<api::Reply> run(const Arguments& arguments) {
   if (name == "certify") return run_certify(arguments);
   if (name == "weights") return run_weights(arguments);
   if (name == "recheck") return run_recheck(arguments);
+  if (name == "field") return run_field(arguments);
   if (name == "selftest") return run_selftest(arguments);
   return api::Problem{"", "the command " + std::string(name) + " has no function", "", true};
 }

@@ -67,6 +67,16 @@ std::uint64_t euler_phi(std::uint64_t n) {
   return phi;
 }
 
+int moebius(std::uint64_t n) {
+  contract(n != 0, "the Moebius function is asked about a positive number");
+  int sign = 1;
+  for (const std::uint64_t prime : prime_factors(n)) {
+    if (n / prime % prime == 0) return 0;
+    sign = -sign;
+  }
+  return sign;
+}
+
 std::optional<std::uint32_t> multiplicative_order(std::uint64_t q, std::uint64_t n) noexcept {
   require_small(q);
   require_small(n);

@@ -68,6 +68,16 @@ TEST(NumberTheory, PrimeFactorsAndPhi) {
   }
 }
 
+// R. Lidl, H. Niederreiter, Finite Fields, lemma 3.23: the sum of moebius(d) over d | n is 1 for n = 1, otherwise 0.
+TEST(NumberTheory, MoebiusSumsOverDivisorsVanish) {
+  for (std::uint64_t n = 1; n < 600; ++n) {
+    int sum = 0;
+    for (std::uint64_t d = 1; d <= n; ++d)
+      if (n % d == 0) sum += moebius(d);
+    ASSERT_EQ(sum, n == 1 ? 1 : 0) << n;
+  }
+}
+
 // Independent computation: stepping through the powers.
 TEST(NumberTheory, OrdersAgreeWithStepping) {
   for (std::uint64_t n = 1; n < 400; ++n)
