@@ -5,6 +5,7 @@
 
 #include "base/digest.hpp"
 #include "code/construct.hpp"
+#include "sheet/matrix_file.hpp"
 #include "sheet/read_sheet.hpp"
 #include "store/read_file.hpp"
 
@@ -14,13 +15,13 @@ namespace {
 
 Result<sheet::Fetched> fetch_file(const std::string& name, const std::string& from) {
   const std::filesystem::path path = std::filesystem::path(from).parent_path() / name;
-  auto bytes = store::read_file(path.string(), sheet::largest_sheet);
+  auto bytes = store::read_file(path.string(), sheet::largest_matrix_file);
   if (!bytes) return bytes.error();
   return sheet::Fetched{path.string(), *std::move(bytes)};
 }
 
 Result<sheet::Fetched> fetch_nothing(const std::string& name, const std::string&) {
-  return Failure{name, "files cannot be named here", "write the sub-sheet as a table"};
+  return Failure{name, "files cannot be named here", "write what it holds into the sheet"};
 }
 
 Result<Subject> build(sheet::Description description, std::string sheet_digest) {

@@ -42,7 +42,8 @@ std::string to_decimal(const BigInteger& value) { return value.str(); }
 
 std::string grouped_decimal(const BigInteger& value) {
   std::string digits = to_decimal(value);
-  for (std::size_t from_end = 3; from_end < digits.size(); from_end += 4) digits.insert(digits.size() - from_end, 1, ',');
+  for (std::size_t from_end = 3; from_end < digits.size(); from_end += 4)
+    digits.insert(digits.size() - from_end, 1, ',');
   return digits;
 }
 

@@ -12,5 +12,7 @@ std::string description_digest(const Description& description);
 
 /// "cyclic", "reed-solomon", ...: the name of a family as it stands in sheets.
 std::string_view family_name(const Family& family) noexcept;
+/// "blocks", "double", "bordered" or "exponents".
+std::string_view form_name(QuasiCyclic::Form form) noexcept;
 
 }  // namespace assize::sheet

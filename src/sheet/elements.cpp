@@ -56,6 +56,7 @@ Result<Element> parse_element(std::string_view text, const field::Field& field) 
   if (!polynomial) return polynomial.error();
   Element sum = 0;
   for (std::size_t i = 0; i < polynomial->size(); ++i) {
+    if ((*polynomial)[i] == 0) continue;
     const Element term = field.multiply((*polynomial)[i], field.power(field.class_of_x(), i));
     sum = field.add(sum, term);
   }

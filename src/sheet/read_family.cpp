@@ -3,20 +3,11 @@
 #include <functional>
 
 #include "sheet/elements.hpp"
+#include "sheet/family_reading.hpp"
 #include "sheet/polynomial_notation.hpp"
-#include "sheet/read_parts.hpp"
+#include "sheet/rows_from_file.hpp"
 
 namespace assize::sheet {
-
-namespace {
-
-/// What a family reader works with.
-struct Reading {
-  TableReader& table;
-  const Context& context;
-  Description& description;  ///< its field is set; a concatenated code sets it
-  [[nodiscard]] const field::Field& field() const { return description.field; }
-};
 
 Result<Located<Elements>> located_elements(Reading& in, std::string_view key, const field::Field& field,
                                            std::string_view example) {
@@ -40,10 +31,18 @@ Result<Located<std::uint64_t>> codeword_length(Reading& in) {
   return in.table.integer("codeword_length", 1, largest_length, "codeword_length = 1016");
 }
 
+namespace {
+
 Result<Family> read_matrix(Reading& in, bool parity_check) {
+  auto from_file = rows_from_file(in.table, in.context, in.field());
+  if (!from_file) return from_file.error();
+  if (from_file->has_value()) {
+    (*from_file)->parity_check = parity_check;
+    return Family(**std::move(from_file));
+  }
   MatrixRows out;
   out.parity_check = parity_check;
-  const auto node = in.table.required("rows", R"(rows = ["1 0 1", "0 1 1"])");
+  const auto node = in.table.required("rows", R"(rows = ["1 0 1", "0 1 1"] or file = "matrix.txt")");
   if (!node) return node.error();
   const auto* array = std::get_if<Array>(&(*node)->value);
   if (array == nullptr || array->empty())
@@ -208,60 +207,6 @@ Result<Family> read_random_linear(Reading& in) {
   return Family(RandomLinear{*length, *dimension, *seed});
 }
 
-/// A sub-sheet: a table of the shape of a sheet, or the name of another file.
-Result<SubDescription> read_sub_sheet(Reading& in, std::string_view key) {
-  const auto node = in.table.required(
-      key, std::string(key) + " = \"" + std::string(key) + ".toml\", or a table [code." + std::string(key) + ".code]");
-  if (!node) return node.error();
-  Context inner = in.context;
-  ++inner.depth;
-  const auto share = [](Result<Description> read) -> Result<SubDescription> {
-    if (!read) return read.error();
-    return SubDescription(std::make_shared<const Description>(*std::move(read)));
-  };
-  if (const auto* table = std::get_if<Table>(&(*node)->value))
-    return share(read_description(*table, (*node)->line, inner));
-  const auto* name = std::get_if<std::string>(&(*node)->value);
-  if (name == nullptr)
-    return in.table.failure((*node)->line, std::string(key) + " is " + std::string(kind_of(**node)),
-                            "name a file, or write a table [code." + std::string(key) + ".code]");
-  const auto fetched = (*in.context.fetch)(*name, in.context.source);
-  if (!fetched)
-    return in.table.failure((*node)->line, "the sub-sheet " + fetched.error().where + ": " + fetched.error().what,
-                            fetched.error().cure);
-  const auto document = parse_document(fetched->bytes, fetched->source);
-  if (!document) return document.error();
-  inner.source = fetched->source;
-  return share(read_description(std::get<Table>(document->value), 1, inner));
-}
-
-Result<Family> read_concatenated(Reading& in) {
-  Concatenated out;
-  auto outer = read_sub_sheet(in, "outer");
-  if (!outer) return outer.error();
-  out.outer = *std::move(outer);
-  const Node* inner_node = in.table.optional("inner");
-  auto inner = read_sub_sheet(in, "inner");
-  if (!inner) return inner.error();
-  out.inner = *std::move(inner);
-  out.inner_line = inner_node->line;
-  const field::Field words = word_field(*out.inner);
-  if (in.description.field_stated && !(in.description.field == words))
-    return in.table.failure(in.description.field_line, "[field] is not the field of the inner words",
-                            "leave [field] out: a concatenated code has the field of its inner code");
-  in.description.field = words;
-  if (words.degree() > 1) {
-    const field::Field symbols = word_field(*out.outer);
-    const auto embedding = located_element(in, "embedding", symbols, "embedding = \"x^5\"");
-    if (!embedding) return embedding.error();
-    out.embedding = *embedding;
-    auto basis = located_elements(in, "symbol_basis", symbols, "symbol_basis = [1, 2]");
-    if (!basis) return basis.error();
-    out.symbol_basis = *std::move(basis);
-  }
-  return Family(std::move(out));
-}
-
 using FamilyReader = std::function<Result<Family>(Reading&)>;
 
 const std::vector<std::pair<std::string_view, FamilyReader>>& families() {
@@ -270,10 +215,16 @@ const std::vector<std::pair<std::string_view, FamilyReader>>& families() {
       {"parity-check-matrix", [](Reading& in) { return read_matrix(in, true); }},
       {"cyclic", [](Reading& in) { return read_cyclic(in, false); }},
       {"shortened-cyclic", [](Reading& in) { return read_cyclic(in, true); }},
+      {"bch", read_bch},
+      {"quadratic-residue", read_quadratic_residue},
+      {"quasi-cyclic", read_quasi_cyclic},
       {"reed-muller", read_reed_muller},
       {"reed-solomon", read_reed_solomon},
       {"concatenated", read_concatenated},
       {"justesen", read_justesen},
+      {"product", [](Reading& in) { return read_pair(in, Pair::Kind::product); }},
+      {"direct-sum", [](Reading& in) { return read_pair(in, Pair::Kind::direct_sum); }},
+      {"plotkin-sum", [](Reading& in) { return read_pair(in, Pair::Kind::plotkin_sum); }},
       {"random-linear", read_random_linear},
   };
   return table;

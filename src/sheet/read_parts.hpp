@@ -20,11 +20,17 @@ struct Context {
 /// A sheet or sub-sheet: keys title, field, code, then.
 Result<Description> read_description(const Table& table, int line, const Context& context);
 
+/// The table [field], or one of its shape.
+Result<field::Field> read_field(const Node& node, const std::string& source);
+
 /// The table [code]; `description` already has its field.
 Result<Family> read_family(const Table& table, int line, const Context& context, Description& description);
 
 /// The array [[then]]; elements of bases are read over the field that the words have at that step.
 Result<std::vector<Step>> read_steps(const Node& node, const field::Field& words, const std::string& source);
+
+/// The table [transmission].
+Result<Transmission> read_transmission(const Node& node, const std::string& source);
 
 /// The field of the words of a family before any step, given [field].
 field::Field family_field(const Family& family, const field::Field& field);

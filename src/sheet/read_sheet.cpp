@@ -20,7 +20,9 @@ Result<const Table*> as_table(const Node& node, const std::string& source, std::
                  "begin a table with [" + std::string(name) + "] on a line of its own"};
 }
 
-/// order = q and, for q = p^m with m > 1, modulus; the modulus is written like any other polynomial, over GF(p).
+}  // namespace
+
+// order = q and, for q = p^m with m > 1, modulus; the modulus is written like any other polynomial, over GF(p).
 Result<field::Field> read_field(const Node& node, const std::string& source) {
   const auto entries = as_table(node, source, "field");
   if (!entries) return entries.error();
@@ -50,6 +52,33 @@ Result<field::Field> read_field(const Node& node, const std::string& source) {
   auto field = field::Field::create(static_cast<std::uint32_t>(order->value), modulus);
   if (!field) return table.failure(line, field.error().what, field.error().cure);
   return field;
+}
+
+namespace {
+
+/// A root modulus that was filled in fixes the code only up to a permutation of positions.
+bool positions_are_open(const Description& description) {
+  if (const auto* bch = std::get_if<Bch>(&description.family)) return bch->root_modulus.line == 0;
+  if (const auto* concatenated = std::get_if<Concatenated>(&description.family)) {
+    bool open = positions_are_open(*concatenated->outer);
+    for (const SubDescription& inner : concatenated->inner) open = open || positions_are_open(*inner);
+    return open;
+  }
+  if (const auto* pair = std::get_if<Pair>(&description.family))
+    return positions_are_open(*pair->first) || positions_are_open(*pair->second);
+  return false;
+}
+
+Result<void> check_positions_are_fixed(const Description& description) {
+  for (const Step& step : description.steps) {
+    const bool names_positions = std::holds_alternative<Puncture>(step.what) ||
+                                 std::holds_alternative<Shorten>(step.what) ||
+                                 std::holds_alternative<Permute>(step.what);
+    if (names_positions && positions_are_open(description))
+      return Failure{description.place(step.line), "this step names positions, but the BCH code has no root_modulus",
+                     "state root_modulus: other moduli give the same code with its positions in another order"};
+  }
+  return {};
 }
 
 }  // namespace
@@ -86,7 +115,13 @@ Result<Description> read_description(const Table& entries, int line, const Conte
     if (!steps) return steps.error();
     description.steps = *std::move(steps);
   }
+  if (const Node* node = table.optional("transmission")) {
+    auto transmission = read_transmission(*node, context.source);
+    if (!transmission) return transmission.error();
+    description.transmission = *std::move(transmission);
+  }
   if (const auto done = table.finish(); !done) return done.error();
+  if (const auto fixed = check_positions_are_fixed(description); !fixed) return fixed.error();
   return description;
 }
 
