@@ -28,30 +28,49 @@ Result<Matrix> inner_generator(const sheet::Description& inner) {
   return written;
 }
 
+Result<std::vector<Matrix>> inner_generators(const sheet::Concatenated& family, const sheet::Description& in,
+                                             std::uint32_t outer_length) {
+  if (family.by_position && family.inner.size() != outer_length)
+    return Failure{in.place(family.inner_line),
+                   "inner_by_position has " + std::to_string(family.inner.size()) + " codes, the outer words have " +
+                       std::to_string(outer_length) + " positions",
+                   "write one for each position"};
+  std::vector<Matrix> out;
+  for (const sheet::SubDescription& inner : family.inner) {
+    auto generator = inner_generator(*inner);
+    if (!generator) return generator.error();
+    if (!out.empty() && generator->rows() != out.front().rows())
+      return Failure{in.place(family.inner_line), "the inner codes have different dimensions",
+                     "each must have as many words as there are outer symbols"};
+    out.push_back(*std::move(generator));
+  }
+  return out;
+}
+
 Result<Concatenation> parts_of(const sheet::Concatenated& family, const sheet::Description& in) {
   auto outer = construct(*family.outer);
   if (!outer) return outer.error();
-  auto inner = inner_generator(*family.inner);
+  auto inner = inner_generators(family, in, outer->length());
   if (!inner) return inner.error();
-  const field::Field small = sheet::word_field(*family.inner);
+  const field::Field small = sheet::word_field(*family.inner.front());
   const field::Field& large = outer->field();
-  const auto size = power_if_fits(small.order(), inner->rows());
-  if (size != large.order())
+  const std::size_t rows = inner->front().rows();
+  if (power_if_fits(small.order(), rows) != large.order())
     return Failure{in.place(family.inner_line),
-                   "the inner code has " + std::to_string(small.order()) + "^" + std::to_string(inner->rows()) +
+                   "the inner code has " + std::to_string(small.order()) + "^" + std::to_string(rows) +
                        " words, the outer symbols are " + std::to_string(large.order()),
                    "inner words and outer symbols must be equally many: q^(inner dimension) = Q"};
   if (small.degree() == 1)
-    return Concatenation{*std::move(outer), small, Coordinates::digits(large), {*std::move(inner)}};
+    return Concatenation{*std::move(outer), small, Coordinates::digits(large), *std::move(inner)};
   contract(family.embedding && family.symbol_basis, "the reader demands embedding and symbol_basis");
   const int line = family.symbol_basis->line;
-  if (family.symbol_basis->value.size() != inner->rows())
+  if (family.symbol_basis->value.size() != rows)
     return Failure{in.place(line),
                    "symbol_basis has " + std::to_string(family.symbol_basis->value.size()) + " elements",
-                   "list " + std::to_string(inner->rows()) + ", one for each row of the inner generator"};
+                   "list " + std::to_string(rows) + ", one for each row of the inner generator"};
   auto coordinates = Coordinates::create(small, large, family.embedding->value, family.symbol_basis->value);
   if (!coordinates) return Failure{in.place(line), coordinates.error().what, coordinates.error().cure};
-  return Concatenation{*std::move(outer), small, *std::move(coordinates), {*std::move(inner)}};
+  return Concatenation{*std::move(outer), small, *std::move(coordinates), *std::move(inner)};
 }
 
 /// Row j of the inner generator of a position: the pair (x^j, factor x^j) as bits, or (1, factor) as symbols.

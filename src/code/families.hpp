@@ -9,6 +9,10 @@ namespace assize::code {
 
 Result<LinearCode> build(const sheet::MatrixRows& family, const sheet::Description& in);
 Result<LinearCode> build(const sheet::Cyclic& family, const sheet::Description& in);
+Result<LinearCode> build(const sheet::Bch& family, const sheet::Description& in);
+Result<LinearCode> build(const sheet::QuadraticResidue& family, const sheet::Description& in);
+Result<LinearCode> build(const sheet::QuasiCyclic& family, const sheet::Description& in);
+Result<LinearCode> build(const sheet::Pair& family, const sheet::Description& in);
 Result<LinearCode> build(const sheet::ReedMuller& family, const sheet::Description& in);
 Result<LinearCode> build(const sheet::ReedSolomonByPoints& family, const sheet::Description& in);
 Result<LinearCode> build(const sheet::ReedSolomonByRoots& family, const sheet::Description& in);
