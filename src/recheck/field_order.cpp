@@ -18,6 +18,8 @@ bool divides(const std::vector<std::uint64_t>& divisor, std::vector<std::uint64_
   return std::all_of(dividend.begin(), dividend.end(), [](std::uint64_t c) { return c == 0; });
 }
 
+}  // namespace
+
 bool irreducible(const std::vector<Symbol>& modulus, std::uint64_t p) {
   const std::vector<std::uint64_t> whole(modulus.begin(), modulus.end());
   const std::size_t degree = whole.size() - 1;
@@ -34,8 +36,6 @@ bool irreducible(const std::vector<Symbol>& modulus, std::uint64_t p) {
   }
   return true;
 }
-
-}  // namespace
 
 Result<FieldPtr> Field::make(std::uint64_t order, std::vector<Symbol> modulus, const std::string& where) {
   if (order < 2 || order > 65536) return Failure{where, "the order of a field is from 2 to 65536", ""};

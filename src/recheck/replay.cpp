@@ -4,7 +4,6 @@
 #include "recheck/word.hpp"
 
 namespace assize::recheck {
-namespace {
 
 Result<FieldPtr> read_field(const Json& json, const std::string& path) {
   Keys keys(json, path);
@@ -21,6 +20,8 @@ Result<FieldPtr> read_field(const Json& json, const std::string& path) {
   return Field::make(order, std::move(modulus), path);
 }
 
+namespace {
+
 Result<Built> build_family(Keys& code, const std::string& family, const FieldPtr& field, const Brake& brake) {
   if (family == "generator-matrix") return build_generator_matrix(code, field);
   if (family == "parity-check-matrix") return build_parity_check_matrix(code, field, brake);
@@ -31,6 +32,11 @@ Result<Built> build_family(Keys& code, const std::string& family, const FieldPtr
   if (family == "concatenated") return build_concatenated(code, field, brake);
   if (family == "justesen") return build_justesen(code, field, brake);
   if (family == "random-linear") return build_random_linear(code, field);
+  if (family == "bch") return build_bch(code, field, brake);
+  if (family == "quadratic-residue") return build_quadratic_residue(code, field);
+  if (family == "quasi-cyclic") return build_quasi_cyclic(code, field, brake);
+  if (family == "product" || family == "direct-sum" || family == "plotkin-sum")
+    return build_of_two(code, family, field, brake);
   code.refuse("family", "the family \"" + family + "\" is unknown");
   return code.failure();
 }
@@ -67,7 +73,7 @@ Result<Replayed> replay_description(const Json& description, const std::string& 
   for (std::size_t i = 0; i < steps.size(); ++i) {
     brake.poll();
     const std::string at = keys.at("then") + "[" + std::to_string(i) + "]";
-    auto next = apply_step(steps[i], at, result.field, result.reduced);
+    auto next = apply_step(steps[i], at, result.field, result.reduced, brake);
     if (!next) return next.error();
     result.field = next->field;
     result.reduced = reduce(*result.field, std::move(next->rows), brake);

@@ -38,6 +38,9 @@ struct Replayed {
   std::optional<Parts> parts;        ///< families concatenated and justesen without steps
 };
 
+/// Reads a field: its order and, where the order is not prime, its modulus.
+Result<FieldPtr> read_field(const Json& json, const std::string& path);
+
 Result<Replayed> replay_description(const Json& description, const std::string& path, const Brake& brake);
 
 // One builder for each family: reads its keys from `code`, whose key `family` has been read.
@@ -49,12 +52,21 @@ Result<Built> build_reed_solomon(Keys& code, const FieldPtr& field);
 Result<Built> build_concatenated(Keys& code, const FieldPtr& field, const Brake& brake);
 Result<Built> build_justesen(Keys& code, const FieldPtr& field, const Brake& brake);
 Result<Built> build_random_linear(Keys& code, const FieldPtr& field);
+Result<Built> build_bch(Keys& code, const FieldPtr& field, const Brake& brake);
+Result<Built> build_quadratic_residue(Keys& code, const FieldPtr& field);
+Result<Built> build_quasi_cyclic(Keys& code, const FieldPtr& field, const Brake& brake);
+/// Families product, direct-sum and plotkin-sum.
+Result<Built> build_of_two(Keys& code, const std::string& family, const FieldPtr& field, const Brake& brake);
 
 /// Applies one step of `then` to a code.
-Result<Built> apply_step(const Json& step, const std::string& path, const FieldPtr& field, const Reduced& code);
+Result<Built> apply_step(const Json& step, const std::string& path, const FieldPtr& field, const Reduced& code,
+                         const Brake& brake);
 
-/// All multiples of a polynomial of degree < length; position i carries the coefficient of x^(length-1-i).
-Matrix polynomial_multiples(const std::vector<Symbol>& generator, std::size_t length);
+// The steps by what they do; `keys` stands behind the key `step`.
+Result<Built> step_on_positions(Keys& keys, const std::string& kind, const FieldPtr& field, const Reduced& code,
+                                const Brake& brake);  ///< puncture, shorten, permute, repeat
+Result<Built> step_to_other_words(Keys& keys, const std::string& kind, const FieldPtr& field, const Reduced& code,
+                                  const Brake& brake);  ///< expurgate, augment, subfield-subcode
 
 /// Row j holds the j-th powers of the points.
 Matrix powers_of_points(const Field& field, const std::vector<Symbol>& points, std::size_t dimension);

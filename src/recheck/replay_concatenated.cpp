@@ -1,4 +1,4 @@
-// Concatenated codes: every symbol of an outer word is replaced by a word of the inner code.
+// Concatenated codes: every symbol of an outer word is replaced by a word of the inner code of its position.
 #include "recheck/replay.hpp"
 #include "recheck/word.hpp"
 
@@ -82,18 +82,63 @@ Result<Coordinates> read_coordinates(Keys& code, const Field& outer, const Field
   return over_basis(outer, *images, std::move(*basis), code.at("symbol_basis"));
 }
 
-Matrix expand(const Reduced& outer, const Field& outer_field, const Matrix& inner, const Field& inner_field,
+/// One inner generator for all outer positions or one for each.
+struct Inner {
+  std::vector<Matrix> generators;
+  std::uint64_t length = 0;  ///< over all outer positions
+  [[nodiscard]] const Matrix& at(std::size_t position) const {
+    return generators.size() == 1 ? generators[0] : generators[position];
+  }
+};
+
+/// The generator of an inner code: as written, or reduced.
+Result<Matrix> replay_inner(const Json& json, const std::string& path, const Field& field, std::uint64_t words,
+                            const std::string& whole, const Brake& brake) {
+  auto inner = replay_description(json, path, brake);
+  if (!inner) return inner.error();
+  if (!inner->field->same_as(field))
+    return Failure{whole, "the field of the description is not the field of the inner code's words", ""};
+  Matrix& generator = inner->as_written ? *inner->as_written : inner->reduced.generator;
+  if (generator.rows != inner->reduced.pivots.size())
+    return Failure{path, "the rows of the inner generator matrix are dependent", ""};
+  const auto symbols = power_if_fits(field.order(), generator.rows);
+  if (!symbols || *symbols != words)
+    return Failure{whole, "the outer field does not have as many elements as the inner code has words", ""};
+  return std::move(generator);
+}
+
+Result<Inner> replay_inner_by_position(const Json::Array& list, const std::string& path, const Field& field,
+                                       const Replayed& outer, const Brake& brake) {
+  if (list.size() != outer.reduced.generator.columns)
+    return Failure{path, "there must be one inner code for each outer position", ""};
+  Inner inner;
+  for (std::size_t i = 0; i < list.size(); ++i) {
+    const std::string at = path + "[" + std::to_string(i) + "]";
+    auto generator = replay_inner(list[i], at, field, outer.field->order(), at, brake);
+    if (!generator) return generator.error();
+    inner.length += generator->columns;
+    if (auto fits = matrix_fits(generator->rows, inner.length, path); !fits) return fits.error();
+    inner.generators.push_back(std::move(*generator));
+  }
+  return inner;
+}
+
+Matrix expand(const Reduced& outer, const Field& outer_field, const Inner& inner, const Field& inner_field,
               const Coordinates& coordinates, const Brake& brake) {
   const Matrix& g = outer.generator;
-  Matrix rows(g.rows * inner.rows, g.columns * inner.columns);
+  Matrix rows(g.rows * coordinates.width, inner.length);
   for (std::size_t r = 0; r < g.rows; ++r) {
     brake.poll();
-    for (std::size_t j = 0; j < inner.rows; ++j)
+    for (std::size_t j = 0; j < coordinates.width; ++j) {
+      std::size_t start = 0;
       for (std::size_t i = 0; i < g.columns; ++i) {
+        const Matrix& generator = inner.at(i);
         const auto digits = coordinates.of(outer_field.multiply(coordinates.basis[j], g.row(r)[i]));
-        const auto target = rows.row(r * inner.rows + j).subspan(i * inner.columns, inner.columns);
-        for (std::size_t d = 0; d < inner.rows; ++d) add_multiple(inner_field, target, digits[d], inner.row(d));
+        const auto target = rows.row(r * coordinates.width + j).subspan(start, generator.columns);
+        for (std::size_t d = 0; d < generator.rows; ++d) add_multiple(inner_field, target, digits[d], generator.row(d));
+        start += generator.columns;
       }
+    }
   }
   return rows;
 }
@@ -102,30 +147,32 @@ Matrix expand(const Reduced& outer, const Field& outer_field, const Matrix& inne
 
 Result<Built> build_concatenated(Keys& code, const FieldPtr& field, const Brake& brake) {
   const Json& outer_json = code.object("outer");
-  const Json& inner_json = code.object("inner");
+  const bool by_position = code.next_is("inner_by_position");
+  const Json::Array no_list;
+  const Json::Array& list = by_position ? code.array("inner_by_position") : no_list;
+  const Json* one_for_all = by_position ? nullptr : &code.object("inner");
   if (!code.ok()) return code.failure();
   auto outer = replay_description(outer_json, code.at("outer"), brake);
   if (!outer) return outer.error();
-  auto inner = replay_description(inner_json, code.at("inner"), brake);
-  if (!inner) return inner.error();
-  if (!inner->field->same_as(*field))
-    return Failure{code.path(), "the field of the description is not the field of the inner code's words", ""};
-  const Matrix& generator = inner->as_written ? *inner->as_written : inner->reduced.generator;
-  if (generator.rows != inner->reduced.pivots.size())
-    return Failure{code.at("inner"), "the rows of the inner generator matrix are dependent", ""};
-  const auto symbols = power_if_fits(field->order(), generator.rows);
-  if (!symbols || *symbols != outer->field->order())
-    return Failure{code.path(), "the outer field does not have as many elements as the inner code has words", ""};
-  const auto coordinates = read_coordinates(code, *outer->field, *field, generator.rows);
-  if (!coordinates) return coordinates.error();
   const Matrix& g = outer->reduced.generator;
-  if (auto fits = matrix_fits(std::uint64_t{g.rows} * generator.rows, std::uint64_t{g.columns} * generator.columns,
-                              code.path());
-      !fits)
-    return fits.error();
-  Built built{field, expand(outer->reduced, *outer->field, generator, *field, *coordinates, brake), Parts{}};
+  Inner inner;
+  if (by_position) {
+    auto read = replay_inner_by_position(list, code.at("inner_by_position"), *field, *outer, brake);
+    if (!read) return read.error();
+    inner = std::move(*read);
+  } else {
+    auto read = replay_inner(*one_for_all, code.at("inner"), *field, outer->field->order(), code.path(), brake);
+    if (!read) return read.error();
+    inner.length = std::uint64_t{g.columns} * read->columns;
+    inner.generators.push_back(std::move(*read));
+  }
+  const std::size_t width = inner.generators[0].rows;
+  const auto coordinates = read_coordinates(code, *outer->field, *field, width);
+  if (!coordinates) return coordinates.error();
+  if (auto fits = matrix_fits(std::uint64_t{g.rows} * width, inner.length, code.path()); !fits) return fits.error();
+  Built built{field, expand(outer->reduced, *outer->field, inner, *field, *coordinates, brake), Parts{}};
   built.parts->outer_is_reed_solomon = outer->family == "reed-solomon" && !outer->has_steps;
-  built.parts->inner.push_back(generator);
+  built.parts->inner = std::move(inner.generators);
   built.parts->inner_field = field;
   built.parts->outer_field = outer->field;
   built.parts->outer = std::move(outer->reduced);

@@ -1,6 +1,7 @@
 // Reed-Solomon codes, by evaluation points or by consecutive roots of the generator polynomial.
 #include <numeric>
 
+#include "recheck/polynomial.hpp"
 #include "recheck/replay.hpp"
 #include "recheck/word.hpp"
 
@@ -53,7 +54,7 @@ Result<Built> by_roots(Keys& code, const FieldPtr& field, std::uint64_t length, 
     for (std::size_t c = generator.size(); c-- > 0;)
       generator[c] = field->add(field->multiply(generator[c], minus_root), c > 0 ? generator[c - 1] : Symbol{0});
   }
-  return Built{field, polynomial_multiples(generator, length), {}};
+  return Built{field, polynomial_multiples(*field, generator, length), {}};
 }
 
 }  // namespace

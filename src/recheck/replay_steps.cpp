@@ -1,4 +1,4 @@
-// The steps of `then`: a parity symbol, the dual code, the binary image.
+// The steps of `then`: reads which one it is; a parity symbol, the dual code, the binary image.
 #include "recheck/replay.hpp"
 #include "recheck/word.hpp"
 
@@ -60,11 +60,16 @@ Result<Built> binary_image(Keys& keys, const FieldPtr& field, const Matrix& g) {
 
 }  // namespace
 
-Result<Built> apply_step(const Json& step, const std::string& path, const FieldPtr& field, const Reduced& code) {
+Result<Built> apply_step(const Json& step, const std::string& path, const FieldPtr& field, const Reduced& code,
+                         const Brake& brake) {
   Keys keys(step, path);
   const std::string kind = keys.text("step");
   if (!keys.ok()) return keys.failure();
   if (kind == "binary-image") return binary_image(keys, field, code.generator);
+  if (kind == "puncture" || kind == "shorten" || kind == "permute" || kind == "repeat")
+    return step_on_positions(keys, kind, field, code, brake);
+  if (kind == "expurgate" || kind == "augment" || kind == "subfield-subcode")
+    return step_to_other_words(keys, kind, field, code, brake);
   if (kind != "extend" && kind != "dual") return Failure{keys.at("step"), "the step \"" + kind + "\" is unknown", ""};
   if (auto end = keys.end(); !end) return end.error();
   if (kind == "extend") return extend(field, code.generator, path);

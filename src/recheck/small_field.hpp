@@ -63,4 +63,7 @@ class Field {
 
 using FieldPtr = std::shared_ptr<const Field>;
 
+/// A monic polynomial of degree >= 1 over GF(p) has no divisor of a lower degree >= 1; tries all up to half its degree.
+bool irreducible(const std::vector<Symbol>& modulus, std::uint64_t p);
+
 }  // namespace assize::recheck
