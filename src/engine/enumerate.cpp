@@ -81,7 +81,8 @@ Result<EnumerationOutcome> enumerate(const code::LinearCode& code, const plan::P
       shards.shards, options.threads, [&](std::uint64_t shard) { return !bound.excludes(shard) && !watch.must_end(); },
       [&](std::uint64_t shard) {
         Slot& slot = slots[shard];
-        slot.finding = engine->run(shard);
+        slot.finding = engine->run(shard, [&watch] { return watch.must_give_up(); });
+        if (slot.finding.given_up) return;
         slot.fault = checks.fault_of_shard(shard, slot.finding);
         if (slot.fault || slot.finding.lightest_weight < wanted) bound.lower(shard);
         watch.finished(shard_size(shards, shard), slot.finding.lightest_weight);
@@ -95,6 +96,7 @@ Result<EnumerationOutcome> enumerate(const code::LinearCode& code, const plan::P
   std::uint64_t lightest_shard = 0;
   for (std::uint64_t shard = 0; shard < done; ++shard) {
     Slot& slot = slots[shard];
+    if (slot.finding.given_up) continue;
     if (slot.fault) return self_check_failure("shard " + std::to_string(shard), *slot.fault);
     if (slot.finding.lightest_weight < (lightest != nullptr ? lightest->lightest_weight : UINT32_MAX)) {
       lightest = &slot.finding;

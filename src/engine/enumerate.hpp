@@ -19,9 +19,9 @@ namespace assize::engine {
 struct RunOptions {
   unsigned threads = 1;
   const kernel::KernelSet* kernel = nullptr;  ///< must be set
-  const StopFlag* stop = nullptr;             ///< ends the run at the next shard boundary
+  const StopFlag* stop = nullptr;             ///< ends the run at the next shard boundary, or after two seconds
   const Clock* clock = nullptr;               ///< must be set
-  double budget_seconds = 0;                  ///< 0: none; otherwise no shard is begun after this time
+  double budget_seconds = 0;  ///< 0: none; otherwise no shard is begun after this time, and none goes on for long
   Progress* progress = nullptr;
   std::optional<std::uint32_t> at_least = {};  ///< stop as soon as a lighter word than this is found (refutation)
 };

@@ -20,18 +20,20 @@ class Exhaust final : public ShardEngine {
   Exhaust(const code::LinearCode& code, const evidence::EnumerationPlan& plan, const kernel::KernelSet& kernel)
       : code_(code),
         plan_(plan),
+        long_shards_(*power_if_fits(plan.order, plan.free_rows) > messages_between_questions),
         walk_(code.order() == 2 ? make_binary_walk(code, plan.free_rows, kernel.binary_walk)
                                 : make_symbol_walk(code, plan.free_rows, kernel.symbol_walk)) {}
 
-  [[nodiscard]] Finding run(std::uint64_t shard) const override {
+  using ShardEngine::run;
+  [[nodiscard]] Finding run(std::uint64_t shard, const GiveUp& give_up) const override {
     Finding finding;
     std::vector<std::uint64_t> counts(std::size_t{code_.length()} + 1, 0);
     if (shard > 0) {
-      walk(message_in_shard(plan_, shard, 0), plan_.free_rows, 0, counts, finding);
+      walk_in_pieces(message_in_shard(plan_, shard, 0), plan_.free_rows, 0, counts, give_up, finding);
     } else {
       std::uint64_t lead = 1;
       for (std::uint32_t below = 0; below < plan_.free_rows; ++below) {
-        walk(message_in_shard(plan_, 0, lead), below, lead, counts, finding);
+        walk_in_pieces(message_in_shard(plan_, 0, lead), below, lead, counts, give_up, finding);
         if (below + 1 < plan_.free_rows) lead = mul_exact(lead, plan_.order);
       }
     }
@@ -42,6 +44,23 @@ class Exhaust final : public ShardEngine {
 
  private:
   /// All messages that begin with `message` and end with any `rows` symbols; `tail` is the tail of `message`.
+  /// Long walks are cut by their first symbol, in ascending order.
+  void walk_in_pieces(std::vector<Element> message, std::uint32_t rows, std::uint64_t tail,
+                      std::span<std::uint64_t> counts, const GiveUp& give_up, Finding& finding) const {
+    if (finding.given_up) return;
+    const std::uint64_t messages = *power_if_fits(plan_.order, rows);
+    if (messages <= messages_between_questions) {
+      finding.given_up = long_shards_ && give_up();
+      if (!finding.given_up) walk(std::move(message), rows, tail, counts, finding);
+      return;
+    }
+    for (std::uint32_t a = 0; a < plan_.order; ++a) {
+      message[plan_.dimension - rows] = static_cast<Element>(a);
+      walk_in_pieces(message, rows - 1, tail + a * (messages / plan_.order), counts, give_up, finding);
+    }
+  }
+
+  /// The same in one go.
   void walk(std::vector<Element> message, std::uint32_t rows, std::uint64_t tail, std::span<std::uint64_t> counts,
             Finding& finding) const {
     const CosetWalk::Walked walked = walk_->walk(code_.encode(message), rows, counts);
@@ -57,6 +76,7 @@ class Exhaust final : public ShardEngine {
 
   const code::LinearCode& code_;
   evidence::EnumerationPlan plan_;
+  bool long_shards_;
   std::unique_ptr<CosetWalk> walk_;
 };
 

@@ -8,6 +8,8 @@ namespace assize::engine {
 namespace {
 
 constexpr double seconds_between_reports = 0.05;
+/// A shard that is being worked on when the run must end is finished if that takes no longer than this.
+constexpr double seconds_to_finish = 2;
 
 }  // namespace
 
@@ -21,8 +23,11 @@ bool RunWatch::must_end() {
     reason_ = Ending::interrupted;
   else if (options_.budget_seconds > 0 && options_.clock->seconds() - start_ >= options_.budget_seconds)
     reason_ = Ending::budget;
+  if (reason_) reason_seen_ = options_.clock->seconds();
   return reason_.has_value();
 }
+
+bool RunWatch::must_give_up() { return must_end() && options_.clock->seconds() - reason_seen_ >= seconds_to_finish; }
 
 void RunWatch::finished(std::uint64_t messages, std::uint32_t lightest_weight) {
   const std::lock_guard lock(mutex_);

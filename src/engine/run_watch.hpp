@@ -16,6 +16,8 @@ class RunWatch {
 
   /// Asked to stop, or out of budget.  The first reason is kept.
   [[nodiscard]] bool must_end();
+  /// The run must end and a shard in hand takes too long to be finished first.
+  [[nodiscard]] bool must_give_up();
   [[nodiscard]] std::optional<Ending> reason() const noexcept { return reason_; }  ///< once all threads have ended
 
   /// Notes finished messages and the lightest weight among them; passed on at most 20 times a second.
@@ -30,6 +32,7 @@ class RunWatch {
   const double start_;
   std::mutex mutex_;
   std::optional<Ending> reason_;
+  double reason_seen_ = 0;  ///< when the reason was first noticed
   std::uint64_t done_ = 0;
   std::uint64_t total_;
   std::optional<std::uint32_t> lightest_;
