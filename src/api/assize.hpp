@@ -69,8 +69,13 @@ struct Run {
   std::function<void(const Progress&)> on_progress;  ///< called from any thread, one call at a time
 };
 
-/// What a sheet describes: parameters, readings, defaults, digests.
-Answer<Reply> show(const std::string& sheet);
+struct ShowRequest {
+  std::string sheet;
+  std::string matrix;  ///< "generator" (reduced) or "parity": the matrix alone; empty: everything else
+  std::string layout;  ///< of the matrix: "text" (if empty), "csv", "matrix-market", "sparse-list" or "npy"
+};
+/// What a sheet describes: parameters, readings, defaults, structure, digests; or one of its matrices.
+Answer<Reply> show(const ShowRequest& request);
 
 enum class Claim { automatic, distance, weights, all };
 

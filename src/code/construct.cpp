@@ -6,6 +6,7 @@
 
 #include "code/families.hpp"
 #include "code/steps.hpp"
+#include "code/symmetry.hpp"
 
 namespace assize::code {
 
@@ -59,6 +60,25 @@ void notice_columns(LinearCode& code) {
 /// The columns of large codes are not compared: it would take longer than the rest.
 constexpr std::uint64_t largest_column_comparison = 1ULL << 22;
 
+/// Maps of the sheet must hold; they come first.
+Result<void> add_stated_symmetries(const sheet::Description& description, LinearCode& code) {
+  std::vector<MonomialMap> stated;
+  for (const sheet::StatedSymmetry& symmetry : description.symmetries) {
+    MonomialMap map{"stated in line " + std::to_string(symmetry.line), symmetry.permutation, symmetry.multipliers};
+    if (map.permutation.size() != code.length() ||
+        (!map.multipliers.empty() && map.multipliers.size() != code.length()))
+      return Failure{description.place(symmetry.line),
+                     "the map does not name each of the " + std::to_string(code.length()) + " positions once",
+                     "list all positions from 0 to " + std::to_string(code.length() - 1)};
+    if (*std::ranges::max_element(map.permutation) >= code.length() || !is_symmetry(code, map))
+      return Failure{description.place(symmetry.line), "the map does not carry the code onto itself",
+                     "new position i takes multipliers[i] times the symbol of old position permutation[i]"};
+    stated.push_back(std::move(map));
+  }
+  code.structure.symmetries.insert(code.structure.symmetries.begin(), stated.begin(), stated.end());
+  return {};
+}
+
 }  // namespace
 
 Result<void> check_size(const sheet::Description& in, int line, std::uint64_t rows, std::uint64_t columns) {
@@ -83,7 +103,11 @@ Result<LinearCode> construct(const sheet::Description& description) {
     return Failure{description.place(description.code_line),
                    "the code has dimension 0: it has no word but the zero word",
                    "a distance is stated for codes of dimension at least 1"};
-  if (std::uint64_t{code->dimension()} * code->redundancy() <= largest_column_comparison) notice_columns(*code);
+  if (std::uint64_t{code->dimension()} * code->redundancy() <= largest_column_comparison) {
+    notice_columns(*code);
+    code->structure.symmetries = known_symmetries(description, *code);
+  }
+  if (const auto fine = add_stated_symmetries(description, *code); !fine) return fine.error();
   return code;
 }
 

@@ -25,10 +25,18 @@ struct ReducedGenerator {
 /// Puts any k x n generator into reduced form; rows that depend on others disappear.
 ReducedGenerator reduce(const field::Field& field, field::Matrix generator);
 
+/// New position i takes multiplier[i] times the symbol of old position permutation[i].
+struct MonomialMap {
+  std::string name;                         ///< for people: "cyclic shift"
+  std::vector<std::uint32_t> permutation;   ///< each position once
+  std::vector<field::Element> multipliers;  ///< none is 0; empty: all 1
+};
+
 /// What a theorem may use: the code is a Reed-Solomon code, all of it, without later steps.
 struct Structure {
   bool reed_solomon = false;
-  std::vector<std::string> notices;  ///< what a user should know: rank deficiency, zero or repeated columns
+  std::vector<MonomialMap> symmetries;  ///< verified on the code
+  std::vector<std::string> notices;     ///< what a user should know: rank deficiency, zero or repeated columns
 };
 
 class LinearCode {

@@ -15,6 +15,12 @@ std::string joined(const std::vector<std::string>& lines) {
   return text;
 }
 
+Json strings(const std::vector<std::string>& lines) {
+  Json::Array array;
+  for (const std::string& line : lines) array.emplace_back(line);
+  return array;
+}
+
 }  // namespace
 
 Document show(const sheet::Description& description, const CodeFacts& facts) {
@@ -29,12 +35,11 @@ Document show(const sheet::Description& description, const CodeFacts& facts) {
   if (!facts.guaranteed_by.empty())
     page.line("guaranteed", "minimum distance at least " + std::to_string(facts.guaranteed) +
                                 " (theorem: " + facts.guaranteed_by + ")");
+  page.line("structure", joined(facts.structure)).line("symmetries", joined(facts.symmetries));
   page.line("notices", joined(facts.notices));
   page.line("sheet digest", facts.sheet_digest).line("description digest", facts.description_digest);
   page.line("generator digest", facts.reduced_generator_digest + " (reduced generator)");
 
-  Json::Array notices;
-  for (const std::string& notice : facts.notices) notices.emplace_back(notice);
   Json::Object json{{"order", Json::integer(facts.order)},
                     {"length", Json::integer(facts.length)},
                     {"dimension", Json::integer(facts.dimension)},
@@ -47,7 +52,9 @@ Document show(const sheet::Description& description, const CodeFacts& facts) {
   json.emplace_back("understood", understood);
   json.emplace_back("field_filled_in", Json::boolean(!description.field_stated));
   json.emplace_back("guaranteed_distance", Json::integer(facts.guaranteed));
-  json.emplace_back("notices", notices);
+  json.emplace_back("structure", strings(facts.structure));
+  json.emplace_back("symmetries", strings(facts.symmetries));
+  json.emplace_back("notices", strings(facts.notices));
   json.emplace_back("sheet_digest", facts.sheet_digest);
   json.emplace_back("description_digest", facts.description_digest);
   json.emplace_back("reduced_generator_digest", facts.reduced_generator_digest);

@@ -13,8 +13,10 @@ struct CodeFacts {
   std::uint32_t order = 2;
   std::uint32_t length = 0;
   std::uint32_t dimension = 0;
-  std::uint32_t guaranteed = 1;  ///< distance proved by theorems alone
-  std::string guaranteed_by;     ///< name of the theorem, empty if there is none
+  std::uint32_t guaranteed = 1;         ///< distance proved by theorems alone
+  std::string guaranteed_by;            ///< name of the theorem, empty if there is none
+  std::vector<std::string> structure;   ///< what holds for all words: "self-dual", "every weight is divisible by 4"
+  std::vector<std::string> symmetries;  ///< verified on the code
   std::vector<std::string> notices;
   std::string sheet_digest;
   std::string description_digest;

@@ -156,6 +156,13 @@ struct Step {
 /// Names and values of [transmission]: start value, inversion, reflections.  No distance depends on them.
 using Transmission = std::vector<std::pair<std::string, std::string>>;
 
+/// A monomial map that the sheet says is a symmetry; verified where the code is built.
+struct StatedSymmetry {
+  std::vector<std::uint32_t> permutation;  ///< new position i takes the old position permutation[i]
+  Elements multipliers;                    ///< empty: all 1
+  int line = 0;
+};
+
 struct Description {
   std::string title;                            ///< free text, not part of the canonical spelling
   std::string source;                           ///< name of the sheet, for messages
@@ -165,7 +172,8 @@ struct Description {
   int code_line = 0;
   Family family;
   std::vector<Step> steps;
-  Transmission transmission;  ///< echoed only, not part of the canonical spelling
+  std::vector<StatedSymmetry> symmetries;  ///< not part of the canonical spelling: they say nothing new of the code
+  Transmission transmission;               ///< echoed only, not part of the canonical spelling
 
   [[nodiscard]] std::string place(int line) const { return source + ":" + std::to_string(line > 0 ? line : code_line); }
 };

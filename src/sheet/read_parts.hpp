@@ -29,6 +29,14 @@ Result<Family> read_family(const Table& table, int line, const Context& context,
 /// The array [[then]]; elements of bases are read over the field that the words have at that step.
 Result<std::vector<Step>> read_steps(const Node& node, const field::Field& words, const std::string& source);
 
+/// A list of distinct positions under `key`, in the order written; that they exist is checked where the length is
+/// known.
+Result<std::vector<std::uint32_t>> read_positions(TableReader& table, std::string_view key);
+
+/// The array [[symmetry]]; multipliers are read over the field of the finished words.
+Result<std::vector<StatedSymmetry>> read_symmetries(const Node& node, const field::Field& words,
+                                                    const std::string& source);
+
 /// The table [transmission].
 Result<Transmission> read_transmission(const Node& node, const std::string& source);
 

@@ -115,6 +115,11 @@ Result<Description> read_description(const Table& entries, int line, const Conte
     if (!steps) return steps.error();
     description.steps = *std::move(steps);
   }
+  if (const Node* node = table.optional("symmetry")) {
+    auto symmetries = read_symmetries(*node, word_field(description), context.source);
+    if (!symmetries) return symmetries.error();
+    description.symmetries = *std::move(symmetries);
+  }
   if (const Node* node = table.optional("transmission")) {
     auto transmission = read_transmission(*node, context.source);
     if (!transmission) return transmission.error();

@@ -8,11 +8,6 @@
 
 namespace assize::sheet {
 
-namespace {
-
-using What = decltype(Step::what);
-
-/// A list of distinct positions; that they exist is checked where the length is known.
 Result<std::vector<std::uint32_t>> read_positions(TableReader& table, std::string_view key) {
   const std::string example = std::string(key) + " = [0, 5, 9]";
   const auto node = table.required(key, example);
@@ -34,6 +29,10 @@ Result<std::vector<std::uint32_t>> read_positions(TableReader& table, std::strin
                          "name each position once");
   return positions;
 }
+
+namespace {
+
+using What = decltype(Step::what);
 
 Result<std::vector<std::uint32_t>> read_ascending(TableReader& table) {
   auto positions = read_positions(table, "positions");

@@ -7,7 +7,7 @@ int main(int argc, char** argv) {
     std::cerr << "usage: consumer SHEET\n";
     return 2;
   }
-  const auto shown = assize::api::show(argv[1]);
+  const auto shown = assize::api::show({argv[1], "", ""});
   if (!shown) {
     std::cerr << shown.problem().where << ": " << shown.problem().what << '\n';
     return 2;
