@@ -115,6 +115,15 @@ bool enumeration_wanted(const CertifyRequest& request, const evidence::Conclusio
   return true;
 }
 
+/// A failure to write at the end must not lose what was found.
+Problem with_result(const Failure& failure, const Findings& findings) {
+  Problem problem = to_problem(failure);
+  problem.cure += (problem.cure.empty() ? "" : "\n  ") +
+                  ("what was found: minimum distance at least " + std::to_string(findings.conclusions.at_least()));
+  if (const auto most = findings.conclusions.at_most()) problem.cure += " and at most " + std::to_string(*most);
+  return problem;
+}
+
 CertifyReply make_reply(const report::CertifyFacts& facts, const Findings& findings) {
   const report::Document document = report::certify(facts, findings.conclusions, findings.items);
   CertifyReply reply;
@@ -152,7 +161,7 @@ Answer<CertifyReply> certify(const CertifyRequest& request) {
   // Asked before the work as well as after it: nobody waits an hour to be told that the name is taken.
   const std::string path = certificate_path(request.output, subject->stem);
   const std::string digest = sheet::description_digest(subject->description);
-  if (const auto free = may_write(path, digest, request.replace); !free) return to_problem(free.error());
+  if (const auto free = may_write(path, request.sheet, digest, request.replace); !free) return to_problem(free.error());
 
   Findings findings;
   findings.items.emplace_back(lightest_row(code));
@@ -181,18 +190,21 @@ Answer<CertifyReply> certify(const CertifyRequest& request) {
   }
   facts.verdict = judge(findings.conclusions, request.at_least);
   if (request.claim != Claim::automatic && request.claim != Claim::distance && !findings.conclusions.distribution())
-    facts.verdict = evidence::Verdict::undecided;  // the weights were asked for and are not complete
+    facts.weights_missing = true;
+  if (facts.weights_missing) facts.verdict = evidence::Verdict::undecided;
+  facts.notices = code.structure.notices;
   facts.witness = spell_word(code.order(), findings.witness().word);
 
   const auto certificate = make_certificate(*subject, findings, world, facts.method, ended, started);
-  const auto existing = may_write(path, digest, request.replace);
-  if (!existing) return to_problem(existing.error());
+  const auto existing = may_write(path, request.sheet, digest, request.replace);
+  if (!existing) return with_result(existing.error(), findings);
   const std::string bytes = certificate::to_bytes(certificate);
   if (bytes.size() > certificate::largest_certificate)
     return Problem{path,
                    "the certificate would have " + std::to_string(bytes.size()) + " bytes, more than a checker reads",
                    "use --claim distance", false};
-  if (const auto written = store::write_file(path, bytes, *existing); !written) return to_problem(written.error());
+  if (const auto written = store::write_file(path, bytes, *existing); !written)
+    return with_result(written.error(), findings);
   facts.certificate = path;
   facts.seconds = world.elapsed();
   return make_reply(facts, findings);

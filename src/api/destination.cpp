@@ -1,6 +1,8 @@
 // The rule of replacement.
 #include "api/destination.hpp"
 
+#include <filesystem>
+
 #include "certificate/certificate.hpp"
 #include "certificate/read.hpp"
 #include "store/read_file.hpp"
@@ -20,8 +22,15 @@ std::string certificate_path(const std::string& output, const std::string& stem)
   return output.empty() ? stem + std::string(certificate_ending) : output;
 }
 
-Result<store::Existing> may_write(const std::string& path, std::string_view description_digest, bool replace) {
+Result<store::Existing> may_write(const std::string& path, const std::string& sheet,
+                                  std::string_view description_digest, bool replace) {
+  if (const auto possible = store::may_write_beside(path); !possible) return possible.error();
   if (!store::exists(path)) return store::Existing::keep;
+  if (!store::is_regular_file(path))
+    return Failure{path, "this is a folder, a link or a device", "name a file of its own with -o"};
+  std::error_code ignored;
+  if (std::filesystem::equivalent(path, sheet, ignored))
+    return Failure{path, "this is the sheet itself", "name another file with -o"};
   const auto refused = [&path](const std::string& why) {
     return Failure{path, "the file exists and " + why, "name another file with -o, or add --replace"};
   };

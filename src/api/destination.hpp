@@ -11,7 +11,9 @@ namespace assize::api {
 /// STEM.certificate.json in the working folder, unless an output was named.
 std::string certificate_path(const std::string& output, const std::string& stem);
 
-/// An unsigned certificate about the same code may be replaced; anything else only if `replace` is set.
-Result<store::Existing> may_write(const std::string& path, std::string_view description_digest, bool replace);
+/// An unsigned certificate about the same code may be replaced; another regular file only if `replace` is set; the
+/// sheet itself, links, devices and folders never.
+Result<store::Existing> may_write(const std::string& path, const std::string& sheet,
+                                  std::string_view description_digest, bool replace);
 
 }  // namespace assize::api

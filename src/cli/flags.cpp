@@ -64,7 +64,8 @@ const std::vector<Command>& commands() {
          "exit code 0 if d >= 8 is proved, 1 if a lighter word refutes it"},
         {"assize certify recorder.toml --plan", "what that would cost"},
         {"assize certify recorder.toml --within 10m -o draft.json", "stops after ten minutes with the bounds so far"}},
-       "0 the bounds meet, or --at-least D is proved   1 --at-least D is refuted by a word\n"
+       "0 what was asked is proved: that the bounds meet, --at-least D, the weights   1 --at-least D is refuted by a "
+       "word\n"
        "3 undecided   2 cannot run   4 self-check failed"},
       {"weights",
        "SHEET",

@@ -38,7 +38,8 @@ std::string overview() {
       "  family = \"cyclic\"\n"
       "  codeword_length = 23\n"
       "  generator = { algebra = \"x^11 + x^9 + x^7 + x^6 + x^5 + x + 1\" }\n\n"
-      "Exit codes: 0 yes   1 no   2 cannot run   3 undecided or cut short   4 self-check failed\n";
+      "Exit codes: 0 yes   1 no   2 cannot run   3 undecided or cut short   4 self-check failed\n"
+      "The first Ctrl-C (or SIGTERM) ends a run in order, a second one at once, with 128 + the number of the signal.\n";
   return out;
 }
 

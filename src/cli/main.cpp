@@ -56,7 +56,7 @@ api::Answer<api::Reply> run(const Arguments& arguments) {
 }
 
 int main_with(std::vector<std::string> words) {
-  watch_signals();
+  turn_signals_of_writing_into_errors();
   const bool json = std::ranges::find(words, "--json") != words.end();
   if (words.empty() || words.front() == "--help" || words.front() == "-h" || words.front() == "help") {
     if (words.size() == 2 && words.front() == "help")

@@ -15,6 +15,8 @@ static_assert(std::atomic<bool>::is_always_lock_free);
 
 extern "C" void on_signal(int number) {
   if (stop_requested.exchange(true)) _exit(128 + number);
+  constexpr std::string_view notice = "\nending within a few seconds; once more ends at once\n";
+  if (isatty(STDERR_FILENO) == 1) static_cast<void>(!write(STDERR_FILENO, notice.data(), notice.size()));
 }
 
 bool write_all(int file, std::string_view text) {
@@ -39,9 +41,15 @@ const std::atomic<bool>& watch_signals() {
   sigemptyset(&action.sa_mask);
   sigaction(SIGINT, &action, nullptr);
   sigaction(SIGTERM, &action, nullptr);
-  action.sa_handler = SIG_IGN;
-  sigaction(SIGPIPE, &action, nullptr);
   return stop_requested;
+}
+
+void turn_signals_of_writing_into_errors() {
+  struct sigaction action {};
+  action.sa_handler = SIG_IGN;
+  sigemptyset(&action.sa_mask);
+  sigaction(SIGPIPE, &action, nullptr);
+  sigaction(SIGXFSZ, &action, nullptr);
 }
 
 }  // namespace assize::cli

@@ -14,8 +14,11 @@ bool print(std::string_view text);
 /// Writes to stderr, as well as it can.
 void complain(std::string_view text);
 
+/// A broken pipe, or a file that may not grow, becomes an error of write() instead of a signal.
+void turn_signals_of_writing_into_errors();
+
 /// From now on the first SIGINT or SIGTERM sets the returned flag, and a second one ends the process with 128 + its
-/// number. A broken pipe becomes an error of print() instead of a signal.
+/// number.
 const std::atomic<bool>& watch_signals();
 
 /// A line on stderr that is drawn over and over while a run goes on.

@@ -27,7 +27,14 @@ bool RunWatch::must_end() {
   return reason_.has_value();
 }
 
-bool RunWatch::must_give_up() { return must_end() && options_.clock->seconds() - reason_seen_ >= seconds_to_finish; }
+bool RunWatch::must_give_up() {
+  const bool ending = must_end();
+  const double now = options_.clock->seconds();
+  if (ending) return now - reason_seen_ >= seconds_to_finish;
+  const std::lock_guard lock(mutex_);
+  if (options_.progress != nullptr && now - last_report_ >= seconds_between_reports) report(now);
+  return false;
+}
 
 void RunWatch::finished(std::uint64_t messages, std::uint32_t lightest_weight) {
   const std::lock_guard lock(mutex_);

@@ -85,7 +85,7 @@ std::string to_text(const Report& report) {
     page += "  " + std::string(name(finding.status)) + ": " + plain(finding.statement) + "\n";
     page += "    " + plain(finding.because) + "\n";
   }
-  if (!report.cautions.empty()) page += "Cautions:\n";
+  if (!report.cautions.empty()) page += "Cautions that the issuer wrote into it (text, not checked):\n";
   for (const std::string& caution : report.cautions) page += "  - " + plain(caution) + "\n";
   return page + std::string(disclaimer);
 }

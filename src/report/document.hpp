@@ -4,6 +4,9 @@
 #include <string_view>
 #include <vector>
 
+#include "base/integers.hpp"
+#include "base/json.hpp"
+
 namespace assize::report {
 
 /// `text` ends with a line break and its first line stands by itself; `json` is one document, ended by a line break.
@@ -27,6 +30,13 @@ class Page {
 
 /// "[23,12] over GF(2)"
 std::string parameters(std::uint32_t order, std::uint32_t length, std::uint32_t dimension);
+
+/// One a line; and as a JSON array.
+std::string joined(const std::vector<std::string>& lines);
+Json strings(const std::vector<std::string>& lines);
+
+/// All digits up to 10^24, "about 10^540" beyond.
+std::string readable(const BigInteger& count);
 
 /// "0.42 s", "12 s", "3 min 20 s", "5 h 10 min", "12 days", "about 10^9 years": rough on purpose.
 std::string duration_text(double seconds);

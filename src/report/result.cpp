@@ -85,7 +85,8 @@ std::string shards_text(std::uint64_t done, std::uint64_t planned) {
 Document certify(const CertifyFacts& facts, const evidence::Conclusions& conclusions,
                  const std::vector<evidence::Item>& items) {
   const std::string verdict(evidence::name(facts.verdict));
-  const std::string wanted = facts.wanted ? ", asked: at least " + std::to_string(*facts.wanted) : "";
+  std::string wanted = facts.wanted ? ", asked: at least " + std::to_string(*facts.wanted) : "";
+  if (facts.weights_missing) wanted += ", asked: all weights";
   Page page(verdict + "  " + parameters(facts.code.order, facts.code.length, facts.code.dimension) + ": " +
             distance_text(conclusions) + wanted);
   const std::string distance_class = class_of<evidence::MinimumDistance>(conclusions, items);
@@ -99,7 +100,7 @@ Document certify(const CertifyFacts& facts, const evidence::Conclusions& conclus
                              counts_text(complete->counts));
   page.line("a lightest word known", facts.witness);
   page.line("method", facts.method).line("shards", shards_text(facts.shards_done, facts.shards_planned));
-  page.line("note", facts.remark);
+  page.line("note", facts.remark).line("notices", joined(facts.notices));
   page.line("certificate", facts.certificate).line("time", duration_text(facts.seconds));
 
   Json::Object json{{"verdict", verdict}};
@@ -113,6 +114,10 @@ Document certify(const CertifyFacts& facts, const evidence::Conclusions& conclus
   json.emplace_back("evidence_class", distance_class);
   json.emplace_back("certificate", facts.certificate.empty() ? Json::null() : Json(facts.certificate));
   json.emplace_back("seconds", Json::fixed(facts.seconds, 3));
+  json.emplace_back("note", facts.remark);
+  json.emplace_back("notices", strings(facts.notices));
+  if (const auto* complete = stated<evidence::CompleteDistribution>(conclusions))
+    json.emplace_back("counts", counts_json(complete->counts));
   return {page.text(), Json(json).text() + "\n"};
 }
 
@@ -120,7 +125,9 @@ Document weights(const WeightsFacts& facts, bool complete, const evidence::Weigh
   Page page((complete ? "complete  " : "partial  ") +
             parameters(facts.code.order, facts.code.length, facts.code.dimension) +
             (complete ? ": words by weight" : ": words by weight in the completed shards only"));
-  page.line("weights", counts_text(counts) + (complete ? "" : "\n(a part of the words: no statement about the code)"));
+  if (!counts.empty())
+    page.line("weights",
+              counts_text(counts) + (complete ? "" : "\n(a part of the words: no statement about the code)"));
   page.line("evidence class", complete ? "re-run" : "").line("method", facts.method);
   page.line("shards", shards_text(facts.shards_done, facts.shards_planned)).line("note", facts.remark);
   page.line("time", duration_text(facts.seconds));
@@ -128,6 +135,7 @@ Document weights(const WeightsFacts& facts, bool complete, const evidence::Weigh
   add_parameters(json, facts.code);
   json.emplace_back("complete", Json::boolean(complete));
   json.emplace_back("counts", counts_json(counts));
+  if (!facts.remark.empty()) json.emplace_back("note", facts.remark);
   return {page.text(), Json(json).text() + "\n"};
 }
 
@@ -139,9 +147,9 @@ Document plan(const Parameters& code, const std::vector<PlanLine>& lines, unsign
                                                 (threads == 1 ? " thread" : " threads")
                                           : "out of reach of any machine";
     page.line(line.method + (line.chosen ? " (chosen)" : ""),
-              grouped_decimal(line.messages) + " messages up to scalars" +
+              readable(line.messages) + " messages up to scalars" +
                   (line.shards > 0 ? " in " + std::to_string(line.shards) + " shards" : "") + "\n" +
-                  grouped_decimal(line.operations) + " operations, " + std::to_string((line.memory_bytes >> 20) + 1) +
+                  readable(line.operations) + " operations, " + std::to_string((line.memory_bytes >> 20) + 1) +
                   " MB at most\n" + time);
     Json::Object entry{{"method", line.method},
                        {"chosen", Json::boolean(line.chosen)},

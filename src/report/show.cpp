@@ -7,22 +7,6 @@
 
 namespace assize::report {
 
-namespace {
-
-std::string joined(const std::vector<std::string>& lines) {
-  std::string text;
-  for (const std::string& line : lines) text += (text.empty() ? "" : "\n") + line;
-  return text;
-}
-
-Json strings(const std::vector<std::string>& lines) {
-  Json::Array array;
-  for (const std::string& line : lines) array.emplace_back(line);
-  return array;
-}
-
-}  // namespace
-
 Document show(const sheet::Description& description, const CodeFacts& facts) {
   const std::uint32_t redundancy = facts.length - facts.dimension;
   Page page(parameters(facts.order, facts.length, facts.dimension));

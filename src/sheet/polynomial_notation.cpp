@@ -87,7 +87,13 @@ Failure bare_number(const Node& node, const std::string& source, std::string_vie
     text = *string;
   } else {
     static constexpr char digits[] = "0123456789ABCDEF";
-    auto value = static_cast<std::uint64_t>(std::get<std::int64_t>(node.value));
+    const std::int64_t number = std::get<std::int64_t>(node.value);
+    if (number < 0) {
+      failure.what = std::string(name) + " is negative";
+      failure.cure = "write " + std::string(example);
+      return failure;
+    }
+    auto value = static_cast<std::uint64_t>(number);
     for (; value != 0; value >>= 4) text.insert(text.begin(), digits[value & 15]);
     text = "0x" + (text.empty() ? "0" : text);
   }
@@ -98,7 +104,11 @@ Failure bare_number(const Node& node, const std::string& source, std::string_vie
   }
   Bits trimmed = *bits;
   field::trim(trimmed);
-  if (trimmed.empty()) return failure;
+  if (trimmed.empty()) {
+    failure.what = std::string(name) + " is zero";
+    failure.cure = "write " + std::string(example);
+    return failure;
+  }
   for (const auto& [spelling, notation] : hex_notations) {
     const bool with_degree = notation == HexNotation::implicit_top || notation == HexNotation::reversed;
     const std::uint64_t degree =
@@ -205,6 +215,10 @@ std::string list_text(const Node& node) {
 
 Result<PolynomialText> read_polynomial(const Node& node, const field::Field& field, const std::string& source,
                                        std::string_view name) {
+  if (const auto* text = std::get_if<std::string>(&node.value);
+      text != nullptr && !text->starts_with("0x") && text->find('x') != std::string::npos)
+    return Failure{source + ":" + std::to_string(node.line), std::string(name) + " is a plain string",
+                   "write " + std::string(name) + " = { algebra = \"" + *text + "\" }"};
   if (std::holds_alternative<std::int64_t>(node.value) || std::holds_alternative<std::string>(node.value))
     return bare_number(node, source, name);
   const auto* entries = std::get_if<Table>(&node.value);

@@ -9,11 +9,14 @@ namespace assize::sheet {
 
 /// How deep sub-sheets may be nested.
 inline constexpr int deepest_nesting = 8;
+/// How many sub-sheets there may be in all.
+inline constexpr int most_sheets = 4096;
 
 /// What readers of nested tables need to know of the whole.
 struct Context {
   std::string source;
   const Fetch* fetch;
+  int* sheets_left;  ///< how many more sub-sheets may be read in all
   int depth = 0;
 };
 

@@ -86,7 +86,11 @@ Result<void> check_positions_are_fixed(const Description& description) {
 Result<Description> read_description(const Table& entries, int line, const Context& context) {
   if (context.depth > deepest_nesting)
     return Failure{context.source + ":" + std::to_string(line),
-                   "sheets are nested more than " + std::to_string(deepest_nesting) + " deep", "use fewer levels"};
+                   "sheets are nested more than " + std::to_string(deepest_nesting) + " deep",
+                   "use fewer levels; perhaps a sheet names itself"};
+  if (--*context.sheets_left < 0)
+    return Failure{context.source + ":" + std::to_string(line),
+                   "there are more than " + std::to_string(most_sheets) + " sub-sheets", "use fewer"};
   TableReader table(entries, context.source, line, "the sheet");
   Description description;
   description.source = context.source;
@@ -133,7 +137,8 @@ Result<Description> read_description(const Table& entries, int line, const Conte
 Result<Description> read_sheet(std::string_view text, const std::string& source, const Fetch& fetch) {
   const auto document = parse_document(text, source);
   if (!document) return document.error();
-  return read_description(std::get<Table>(document->value), 1, {source, &fetch, 0});
+  int sheets_left = most_sheets;
+  return read_description(std::get<Table>(document->value), 1, {source, &fetch, &sheets_left, 0});
 }
 
 }  // namespace assize::sheet

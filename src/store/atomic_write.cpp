@@ -61,6 +61,11 @@ bool rename_if_free(const char* from, const char* to) {
 
 }  // namespace
 
+Result<void> may_write_beside(const std::string& path) {
+  if (access(folder_of(path).c_str(), W_OK | X_OK) == 0) return {};
+  return system_failure(path, "cannot be written");
+}
+
 Result<void> write_file(const std::string& path, std::string_view bytes, Existing existing) {
   std::string temporary;
   int file = -1;

@@ -61,4 +61,9 @@ bool exists(const std::string& path) {
   return lstat(path.c_str(), &status) == 0;
 }
 
+bool is_regular_file(const std::string& path) {
+  struct stat status {};
+  return lstat(path.c_str(), &status) == 0 && S_ISREG(status.st_mode);
+}
+
 }  // namespace assize::store

@@ -11,7 +11,8 @@ namespace assize::store {
 /// Bytes of a regular file of at most `largest` bytes.  Failures name the path and what is there instead.
 Result<std::string> read_file(const std::string& path, std::uint64_t largest);
 
-/// Whether something (of any kind) is at the path.
+/// Whether something (of any kind) is at the path; and whether that is a regular file and not, say, a link or a device.
 bool exists(const std::string& path);
+bool is_regular_file(const std::string& path);
 
 }  // namespace assize::store

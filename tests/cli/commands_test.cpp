@@ -1,4 +1,6 @@
 // The programs as a user meets them: words in, exit code and first line out.
+#include <sys/stat.h>
+
 #include "cli/program.hpp"
 
 namespace assize::cli {
@@ -194,6 +196,80 @@ TEST_F(Commands, OnlyAnUnsignedCertificateOfTheSameCodeIsReplaced) {
   write("c.signatures.json", "{}");
   EXPECT_NE(assize({"certify", "g.toml", "-o", "c.certificate.json"}).err.find("is signed"), std::string::npos);
   EXPECT_EQ(assize({"certify", "h.toml", "-o", "c.certificate.json", "--replace"}).code, 0);
+}
+
+TEST_F(Commands, ThePlaceOfTheCertificateIsLookedAtBeforeTheWork) {
+  write("long.toml", random_binary(64, 44));
+  const Ran ran = assize({"certify", "long.toml", "--within", "1h", "-o", "no/such/folder/c.json"});
+  EXPECT_EQ(ran.code, 2) << "at once, not after an hour";
+}
+
+TEST_F(Commands, OnlyRegularFilesAreReplacedAndNeverTheSheet) {
+  write("g.toml", golay);
+  ASSERT_EQ(assize({"certify", "g.toml"}).code, 0);
+  std::filesystem::create_symlink("g.certificate.json", path("link.json"));
+  std::filesystem::create_directory(path("folder"));
+  ASSERT_EQ(mkfifo(path("pipe").c_str(), 0600), 0);
+  for (const char* taken : {"link.json", "folder", "pipe", "/dev/null"}) {
+    const Ran ran = assize({"certify", "g.toml", "-o", taken, "--replace"});
+    EXPECT_EQ(ran.code, 2) << taken;
+    EXPECT_NE(ran.err.find("a folder, a link or a device"), std::string::npos) << ran.err;
+  }
+  EXPECT_TRUE(std::filesystem::is_symlink(path("link.json")));
+  const Ran sheet = assize({"certify", "g.toml", "-o", "g.toml", "--replace"});
+  EXPECT_EQ(sheet.code, 2);
+  EXPECT_EQ(read("g.toml"), golay);
+}
+
+TEST_F(Commands, AShardThatTakesTooLongIsGivenUp) {
+  write("huge.toml", random_binary(80, 58));  // shards of hours
+  const Ran ran = assize({"certify", "huge.toml", "--within", "1s"});
+  EXPECT_EQ(ran.code, 3);
+  EXPECT_NE(ran.out.find("0 of "), std::string::npos) << ran.out;
+}
+
+TEST_F(Commands, NumbersBeyondReachAreSaidShortly) {
+  write("far.toml", random_binary(4000, 3000));
+  const Ran ran = assize({"weights", "far.toml", "--plan"});
+  EXPECT_EQ(ran.code, 0);
+  EXPECT_NE(ran.out.find("about 10^903 messages"), std::string::npos) << ran.out;
+  EXPECT_EQ(assize({"weights", "far.toml"}).out.find("inf"), std::string::npos);
+}
+
+TEST_F(Commands, TitlesCannotSteerTheTerminal) {
+  write("t.toml", "title = \"\\u001b[31mred\\u202e\"\n" + golay.substr(golay.find('\n') + 1));
+  const Ran ran = assize({"show", "t.toml"});
+  EXPECT_EQ(ran.out.find('\x1b'), std::string::npos);
+  EXPECT_EQ(ran.out.find("\xe2\x80\xae"), std::string::npos);
+  EXPECT_NE(ran.out.find("?[31mred?"), std::string::npos) << ran.out;
+}
+
+TEST_F(Commands, SheetsThatNestWithoutEndAreRefused) {
+  write("self.toml", "[code]\nfamily = \"direct-sum\"\nfirst = \"self.toml\"\nsecond = \"self.toml\"\n");
+  const Ran self = assize({"show", "self.toml"});
+  EXPECT_EQ(self.code, 2);
+  EXPECT_NE(self.err.find("perhaps a sheet names itself"), std::string::npos) << self.err;
+  write("l0.toml", "[code]\nfamily = \"generator-matrix\"\nrows = [\"1\"]\n");
+  for (int level = 1; level <= 3; ++level) {
+    std::string inner;
+    for (int i = 0; i < 60; ++i) inner += "\"l" + std::to_string(level - 1) + ".toml\", ";
+    write("l" + std::to_string(level) + ".toml",
+          "[code]\nfamily = \"concatenated\"\nouter = \"l0.toml\"\ninner_by_position = [" + inner + "]\n");
+  }
+  const Ran wide = assize({"show", "l3.toml"});
+  EXPECT_EQ(wide.code, 2);
+  EXPECT_NE(wide.err.find("more than 4096 sub-sheets"), std::string::npos) << wide.err;
+}
+
+TEST_F(Commands, MatricesThatAreShownCanBeReadBack) {
+  write("g.toml", golay);
+  for (const char* layout : {"text", "csv", "matrix-market", "sparse-list", "npy"}) {
+    write("m", assize({"show", "g.toml", "--matrix", "parity", "--layout", layout}).out);
+    write("from-file.toml",
+          "[code]\nfamily = \"parity-check-matrix\"\nfile = \"m\"\nlayout = \"" + std::string(layout) + "\"\n");
+    const Ran ran = assize({"certify", "from-file.toml", "--quiet"});
+    EXPECT_EQ(ran.out, "proved  [23,12] over GF(2): minimum distance exactly 7\n") << layout << ran.err;
+  }
 }
 
 TEST_F(Commands, SelfTest) {
