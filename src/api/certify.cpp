@@ -171,7 +171,7 @@ Answer<CertifyReply> certify(const CertifyRequest& request) {
   report::CertifyFacts facts;
   facts.code = subject->parameters();
   facts.wanted = request.at_least;
-  facts.method = "theorem";
+  facts.method = findings.conclusions.lower_bound_item() ? "theorem" : "generator row";
   std::string ended = "complete";
   if (enumeration_wanted(request, findings.conclusions, *plan)) {
     // Where the weights are wanted too, a word that is too light does not end the run.

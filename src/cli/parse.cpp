@@ -67,6 +67,9 @@ Result<Arguments> parse(const Command& command, const std::vector<std::string>& 
     for (const std::string& word : app.remaining())
       return Failure{"command line", "\"" + word + "\" is not a flag of assize " + std::string(command.name), help};
     return Failure{"command line", "there are too many words", help};
+  } catch (const CLI::ArgumentMismatch& error) {
+    const std::string text = error.what();
+    return Failure{"command line", text.substr(0, text.find(':')) + " needs a value", help};
   } catch (const CLI::ParseError& error) {
     return Failure{"command line", error.what(), help};
   }

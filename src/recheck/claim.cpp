@@ -88,7 +88,8 @@ std::string Statement::sentence() const {
       }
       break;
     case StatementKind::minimum_words:
-      return "exactly " + grouped_decimal(count) + " words of the minimum weight " + std::to_string(value);
+      return "exactly " + grouped_decimal(count) + (count == 1 ? " word" : " words") + " of the minimum weight " +
+             std::to_string(value);
     case StatementKind::weight_distribution:
       return "complete weight distribution " + describe(counts);
   }

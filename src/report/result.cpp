@@ -156,7 +156,7 @@ Document plan(const Parameters& code, const std::vector<PlanLine>& lines, unsign
                        {"messages", to_decimal(line.messages)},
                        {"operations", to_decimal(line.operations)},
                        {"memory_bytes", std::to_string(line.memory_bytes)},
-                       {"shards", std::to_string(line.shards)}};
+                       {"shards", line.shards > 0 ? Json(std::to_string(line.shards)) : Json::null()}};
     entry.emplace_back("forecast_seconds", line.seconds ? Json::fixed(*line.seconds, 3) : Json::null());
     methods.emplace_back(entry);
   }

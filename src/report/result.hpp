@@ -22,11 +22,11 @@ struct CertifyFacts {
   evidence::Verdict verdict = evidence::Verdict::undecided;
   std::optional<std::uint32_t> wanted;  ///< --at-least
   std::string witness;                  ///< spelled; empty if there is none
-  std::string method;                   ///< what was run: "theorem", "exhaust", "plain"
-  std::string certificate;              ///< path; empty if none was written
-  bool weights_missing = false;         ///< they were asked for, and are not complete
-  std::vector<std::string> notices;     ///< about the code: dependent rows, zero positions
-  std::string remark;                   ///< why the run ended early or did not start
+  std::string method;                ///< what was run: "exhaust", "plain"; or what sufficed: "theorem", "generator row"
+  std::string certificate;           ///< path; empty if none was written
+  bool weights_missing = false;      ///< they were asked for, and are not complete
+  std::vector<std::string> notices;  ///< about the code: dependent rows, zero positions
+  std::string remark;                ///< why the run ended early or did not start
   std::uint64_t shards_done = 0;
   std::uint64_t shards_planned = 0;
   double seconds = 0;

@@ -28,6 +28,8 @@ Result<Family> read_bch(Reading& in) {
   const auto length = codeword_length(in);
   if (!length) return length.error();
   out.codeword_length = *length;
+  if (length->value < 2)
+    return in.table.failure(length->line, "a BCH code has at least 2 symbols", "write a larger codeword_length");
   const auto designed = in.table.integer("designed_distance", 2, length->value, "designed_distance = 7");
   if (!designed) return designed.error();
   out.designed_distance = *designed;

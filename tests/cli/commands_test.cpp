@@ -159,19 +159,23 @@ TEST_F(Commands, ABudgetEndsARunWithWhatIsThere) {
 }
 
 TEST_F(Commands, TheFirstSignalEndsTheRunInOrderASecondAtOnce) {
+  // The first line of progress says that the work has begun, however slow the machine is.
+  const auto wait_for_progress = [this] {
+    for (int i = 0; i < 600 && read(".err").empty(); ++i) usleep(100000);
+  };
   write("r.toml", random_binary(64, 40));
   for (const int signal : {SIGINT, SIGTERM}) {
-    const pid_t child = start(ASSIZE_PROGRAM, {"certify", "r.toml", "--within", "10h"});
-    usleep(700000);
+    const pid_t child = start(ASSIZE_PROGRAM, {"certify", "r.toml", "--within", "10h", "--progress"});
+    wait_for_progress();
     kill(child, signal);
     const Ran ran = finish(child);
     EXPECT_EQ(ran.code, 3) << ran.err;
     EXPECT_NE(ran.out.find("interrupted"), std::string::npos) << ran.out;
   }
-  // Shards of a longer job take longer than the pause between the signals.
+  // A shard of a longer job takes longer than the pause between the signals.
   write("long.toml", random_binary(64, 52));
-  const pid_t child = start(ASSIZE_PROGRAM, {"certify", "long.toml", "--within", "10h"});
-  usleep(700000);
+  const pid_t child = start(ASSIZE_PROGRAM, {"certify", "long.toml", "--within", "10h", "--progress"});
+  wait_for_progress();
   kill(child, SIGINT);
   usleep(100000);
   kill(child, SIGINT);
