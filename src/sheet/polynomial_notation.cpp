@@ -260,6 +260,14 @@ Result<PolynomialText> read_polynomial(const Node& node, const field::Field& fie
   return out;
 }
 
+Result<PolynomialText> read_modulus(const Node& node, const field::Field& field, const std::string& source,
+                                    std::string_view name) {
+  const auto* text = std::get_if<std::string>(&node.value);
+  if (text == nullptr || text->starts_with("0x") || text->find('x') == std::string::npos)
+    return read_polynomial(node, field, source, name);
+  return read_polynomial(Node{Table{{"algebra", node}}, node.line}, field, source, name);
+}
+
 std::string every_notation(const field::Polynomial& polynomial) {
   if (polynomial.size() < 2) return "";
   const std::size_t degree = polynomial.size() - 1;

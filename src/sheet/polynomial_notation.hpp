@@ -23,6 +23,10 @@ inline constexpr std::uint64_t largest_polynomial_degree = 65536;
 Result<PolynomialText> read_polynomial(const Node& node, const field::Field& field, const std::string& source,
                                        std::string_view name);
 
+/// A modulus: as read_polynomial, and also as a plain string in x.
+Result<PolynomialText> read_modulus(const Node& node, const field::Field& field, const std::string& source,
+                                    std::string_view name);
+
 /// A polynomial over GF(2) written in each hexadecimal notation, one line each, for people.
 std::string every_notation(const field::Polynomial& polynomial);
 

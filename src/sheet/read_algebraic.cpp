@@ -55,11 +55,7 @@ Result<Family> read_bch(Reading& in) {
   const auto prime = field::Field::prime(field.characteristic());
   if (!prime) return prime.error();
   if (const Node* written = in.table.optional("root_modulus")) {
-    Node polynomial = *written;
-    const auto* text = std::get_if<std::string>(&written->value);
-    if (text != nullptr && text->find('x') != std::string::npos && !text->starts_with("0x"))
-      polynomial.value = Table{{"algebra", *written}};
-    auto read = read_polynomial(polynomial, *prime, in.context.source, "root_modulus");
+    auto read = read_modulus(*written, *prime, in.context.source, "root_modulus");
     if (!read) return read.error();
     out.root_modulus = {std::move(read->coefficients), written->line};
     if (out.root_modulus.value.size() != degree + 1 || out.root_modulus.value.back() != 1 ||

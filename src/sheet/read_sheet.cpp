@@ -40,11 +40,7 @@ Result<field::Field> read_field(const Node& node, const std::string& source) {
     line = written->line;
     const auto prime = field::Field::prime(power->prime);
     if (!prime) return table.failure(line, prime.error().what, prime.error().cure);
-    Node polynomial = *written;
-    const auto* text = std::get_if<std::string>(&written->value);
-    if (text != nullptr && text->find('x') != std::string::npos && !text->starts_with("0x"))
-      polynomial.value = Table{{"algebra", *written}};  // a modulus may be written as a plain string in x
-    const auto read = read_polynomial(polynomial, *prime, source, "modulus");
+    const auto read = read_modulus(*written, *prime, source, "modulus");
     if (!read) return read.error();
     modulus = read->coefficients;
   }
